@@ -1,0 +1,4 @@
+/**
+ * The observable model, undo, and the pure arithmetic of gestures. Uses {@code javafx.base} only.
+ */
+package clampwright.edit;

@@ -1,0 +1,62 @@
+package clampwright.figure;
+
+/** What a mark stands for. A palette gives each role its look. */
+public enum Role {
+  /** The paper itself. */
+  PAPER,
+  /** Filled body of a layer, a washer, the bolt, the nut. */
+  LAYER_BODY,
+  WASHER_BODY,
+  BOLT_BODY,
+  /** Visible edges of parts. */
+  OUTLINE,
+  /** Thin lines of parts: thread roots, chamfers, facets, break lines. */
+  FINE_LINE,
+  /** Section hatching. */
+  HATCH,
+  /** Chain line of the bolt axis. */
+  AXIS,
+  /** The clamp faces. */
+  HEAD_FACE,
+  NUT_FACE,
+  /** Flanks of the cones. */
+  HEAD_CONE,
+  NUT_CONE,
+  /** The same flanks, faint, on the half that tells the matter. */
+  HEAD_CONE_FAINT,
+  NUT_CONE_FAINT,
+  /** The part of the zone that each side governs, filled. */
+  HEAD_GOVERNS,
+  NUT_GOVERNS,
+  BOTH_GOVERN,
+  /** The effective cylinder of an element. */
+  EFFECTIVE_CYLINDER,
+  /** The mark at the element's mid-plane and the call-out that belongs to it, by governing side. */
+  HEAD_MARK,
+  NUT_MARK,
+  BOTH_MARK,
+  /** Dimension and extension lines, their arrowheads and numbers. */
+  DIMENSION,
+  /** Thin leader to a name or number. */
+  LEADER,
+  /** A part's name; the smaller second line under it; a caption of the sheet. */
+  NAME,
+  SUBNAME,
+  CAPTION,
+  /** The outside load. */
+  LOAD,
+  /** Axis, ticks and labels of a scale; a point on it; the point of the method in force. */
+  SCALE,
+  SCALE_TEXT,
+  POINT,
+  POINT_CHOSEN,
+  /** Frame of the selected part; its grips; what lies under the pointer; an insertion grip. */
+  SELECTION,
+  GRIP,
+  HOT,
+  INSERT_GRIP,
+  /** The value at the pointer while dragging. */
+  DRAG_VALUE,
+  /** Why there is no solution, at the part to blame. */
+  PROBLEM
+}

@@ -1,0 +1,2 @@
+/** Sketches on disk. */
+package clampwright.store;
