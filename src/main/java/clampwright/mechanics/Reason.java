@@ -3,6 +3,7 @@ package clampwright.mechanics;
 import clampwright.joint.Part;
 import java.util.List;
 import java.util.Objects;
+import java.util.Optional;
 
 /**
  * Why a joint has no solution, pointing at the part that is to blame. The sentence is put together
@@ -11,8 +12,10 @@ import java.util.Objects;
  * @param part to blame
  * @param cause what is wrong
  * @param values the numbers that the sentence names, in the order the cause says [mm or °]
+ * @param why what keeps the chosen method from applying; empty for the other causes
  */
-public record Reason(Part part, Cause cause, List<Double> values) {
+public record Reason(
+    Part part, Cause cause, List<Double> values, Optional<MemberStiffness.Why> why) {
 
   /** The causes; brackets name the values in order. */
   public enum Cause {
@@ -38,7 +41,7 @@ public record Reason(Part part, Cause cause, List<Double> values) {
     BORE_TOO_WIDE,
     /** A tapped thread needs a layer, not a washer, at the end []. */
     TAPPED_WASHER,
-    /** The method chosen for the headline does not apply; the method says why []. */
+    /** The method chosen for the headline does not apply [], see {@link Reason#why}. */
     METHOD_NOT_APPLICABLE
   }
 
@@ -46,6 +49,12 @@ public record Reason(Part part, Cause cause, List<Double> values) {
     Objects.requireNonNull(part, "part");
     Objects.requireNonNull(cause, "cause");
     values = List.copyOf(values);
+    Objects.requireNonNull(why, "why");
+  }
+
+  /** A reason that names numbers only. */
+  public Reason(Part part, Cause cause, List<Double> values) {
+    this(part, cause, values, Optional.empty());
   }
 
   static Reason of(Part part, Cause cause, Double... values) {
