@@ -1,0 +1,66 @@
+package clampwright.bench;
+
+import clampwright.joint.Anchor;
+import clampwright.joint.Element;
+import clampwright.joint.Fastener;
+import clampwright.joint.Head;
+import clampwright.joint.Joint;
+import clampwright.joint.Load;
+import clampwright.joint.Material;
+import clampwright.joint.Method;
+import clampwright.joint.Outline;
+import clampwright.joint.Preload;
+import clampwright.joint.ScrewThread;
+import clampwright.joint.Strength;
+import clampwright.joint.WasherRule;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** The joint that the benchmarks measure with: M10 through twelve layers of two materials. */
+final class TwelveLayers {
+  private TwelveLayers() {}
+
+  /**
+   * The joint.
+   *
+   * @param everyOther outline of every other layer; the rest are round
+   */
+  static Joint with(Outline everyOther) {
+    Material steel = material(Material.Family.STEEL, 206_000);
+    Material aluminium = material(Material.Family.ALUMINIUM, 71_000);
+    List<Element> elements = new ArrayList<>();
+    for (int i = 0; i < 12; i++) {
+      Outline outline = i % 2 == 0 ? everyOther : new Outline.Round(40 + i);
+      Material material = i % 3 == 0 ? aluminium : steel;
+      elements.add(
+          new Element("Layer " + (i + 1), Element.Kind.LAYER, 3 + i, 11, outline, material));
+    }
+    return new Joint(
+        fastener(steel),
+        elements,
+        WasherRule.AUTOMATIC,
+        WasherRule.AUTOMATIC,
+        Method.USUAL,
+        new Preload(25_000),
+        new Load(8_000, 0.5));
+  }
+
+  private static Fastener fastener(Material steel) {
+    return new Fastener(
+        new ScrewThread("M10", ScrewThread.Form.METRIC, 10, 1.5),
+        new Head(Head.Style.HEXAGON, "own size", 14.6, 6.4, 16, 16),
+        new Anchor.Nut("own size", 14.6, 8.4, 16),
+        OptionalDouble.empty(),
+        OptionalDouble.empty(),
+        OptionalDouble.empty(),
+        0,
+        new Strength("ISO 898-1", "8.8", OptionalDouble.of(580), OptionalDouble.of(640), 800),
+        steel);
+  }
+
+  private static Material material(Material.Family family, double modulus) {
+    return new Material(
+        family.name(), family, modulus, OptionalDouble.of(0.3), OptionalDouble.of(12e-6));
+  }
+}
