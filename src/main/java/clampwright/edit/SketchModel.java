@@ -100,6 +100,12 @@ public final class SketchModel {
     change(name, then, change.apply(sketch()));
   }
 
+  /** Makes a change that was worked out from the present sketch one step, and selects its part. */
+  public void change(Change change) {
+    revert();
+    change(change.name(), change.then(), change.sketch());
+  }
+
   private boolean change(String name, Part then, Sketch changed) {
     endTyping();
     if (changed.equals(sketch())) {
