@@ -33,7 +33,8 @@ public sealed interface Drag permits LengthDrag, OrderDrag, FlankDrag, ShankDrag
       case BODY -> part.isElement() ? Optional.of(OrderDrag.of(sketch, part, grab)) : none();
       case FLANK -> FlankDrag.of(sketch, part, grab);
       case SHANK_EDGE -> ShankDrag.of(sketch, grab);
-      case INSERT -> Optional.of(LayerDrag.at(sketch, LayerDrag.index(sketch, part), grab));
+      case INSERT ->
+          Optional.of(LayerDrag.at(sketch, Interfaces.above(sketch.joint(), part), grab));
     };
   }
 

@@ -2,6 +2,7 @@ package clampwright.edit;
 
 import clampwright.joint.Element;
 import clampwright.joint.Joint;
+import clampwright.joint.Part;
 import java.util.List;
 
 /** Positions of the interfaces of a stack, and where a press means to insert. */
@@ -56,6 +57,12 @@ public final class Interfaces {
       count++;
     }
     return count;
+  }
+
+  /** The interface at the head side of a part; the last one for anything below the stack. */
+  public static int above(Joint joint, Part part) {
+    int count = joint.elements().size();
+    return part.isElement() ? Math.min(part.index(), count) : count;
   }
 
   /** The end of the stack that a position is nearer to. */

@@ -30,12 +30,6 @@ record LayerDrag(Sketch start, Grab grab, Change added) implements Drag {
     return new LayerDrag(sketch, grab, Stacking.washerAdded(sketch, end));
   }
 
-  /** Where an insertion grip puts a new layer: before an element, or last. */
-  static int index(Sketch sketch, Part part) {
-    int count = sketch.joint().elements().size();
-    return part.isElement() ? Math.min(part.index(), count) : count;
-  }
-
   @Override
   public Dragged at(double fromAxis, double z, Snap snap) {
     double along = Math.abs(z - grab.z());
@@ -67,11 +61,6 @@ record LayerDrag(Sketch start, Grab grab, Change added) implements Drag {
     Outline outline = last.sketch().joint().elements().get(added.then().index()).outline();
     Sketch edged = with(element().withOutline(outline));
     return new LayerDrag(start, grab, new Change(added.name(), edged, added.then()));
-  }
-
-  /** What a press without a drag leaves: the part with its usual thickness. */
-  Change usual() {
-    return added;
   }
 
   private Element element() {

@@ -40,12 +40,15 @@ public final class SketchModel {
   private Joint assessedJoint;
   private Assessment lastAssessment;
 
+  private final ReadOnlyObjectWrapper<Sketch> opened;
+
   /** A model that starts with a saved sketch. */
   public SketchModel(Sketch sketch) {
     this.sketch = new ReadOnlyObjectWrapper<>(this, "sketch", sketch);
     this.selection = new Selection(this, this.sketch::get);
     this.assessment = this.sketch.map(this::assessed);
     this.history = new History(sketch);
+    this.opened = new ReadOnlyObjectWrapper<>(this, "opened", sketch);
   }
 
   public ReadOnlyObjectProperty<Sketch> sketchProperty() {
@@ -238,7 +241,13 @@ public final class SketchModel {
     endTyping();
     history = new History(sketch);
     show(sketch, Part.JOINT);
+    opened.set(sketch);
     tell();
+  }
+
+  /** The sketch that the history starts with; another one when a sketch has been opened. */
+  public ReadOnlyObjectProperty<Sketch> openedProperty() {
+    return opened.getReadOnlyProperty();
   }
 
   /**

@@ -63,6 +63,12 @@ public record Snap(double step) {
     return exact(Math.max(lowest, Math.min(highest, Math.rint(value / step))) * step);
   }
 
+  /** The next step above a length, or below it where the steps are negative; at least one step. */
+  public double next(double value, int steps) {
+    double from = steps > 0 ? Math.floor(value / step + 1e-9) : Math.ceil(value / step - 1e-9);
+    return exact(Math.max(1, from + steps) * step);
+  }
+
   /** An angle in half degrees that catches at 30° and 45°. */
   double degrees(double value) {
     if (isFree()) {
