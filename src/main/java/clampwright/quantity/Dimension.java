@@ -8,37 +8,27 @@ import java.util.List;
  */
 public enum Dimension {
   LENGTH(
-      List.of(new Unit("mm", 1), new Unit("cm", 10), new Unit("m", 1000), new Unit("µm", 0.001)),
-      List.of(new Unit("in", Unit.INCH), new Unit("\"", Unit.INCH))),
-  AREA(List.of(new Unit("mm²", 1)), List.of(new Unit("in²", Unit.INCH * Unit.INCH))),
+      List.of(
+          Unit.of("mm", "1"), Unit.of("cm", "10"), Unit.of("m", "1000"), Unit.of("µm", "0.001")),
+      List.of(Unit.of("in", Unit.INCH), Unit.of("\"", Unit.INCH))),
+  AREA(
+      List.of(Unit.of("mm²", "1")), List.of(Unit.of("in²", "1").times(Unit.INCH).times(Unit.INCH))),
   FORCE(
-      List.of(new Unit("kN", 1000), new Unit("N", 1)),
-      List.of(new Unit("lbf", Unit.POUND), new Unit("klbf", 1000 * Unit.POUND))),
+      List.of(Unit.of("kN", "1000"), Unit.of("N", "1")),
+      List.of(Unit.of("lbf", Unit.POUND), Unit.of("klbf", "1000").times(Unit.POUND))),
   STIFFNESS(
-      List.of(new Unit("kN/mm", 1000), new Unit("N/mm", 1)),
-      List.of(new Unit("Mlbf/in", 1e6 * Unit.POUND / Unit.INCH))),
+      List.of(Unit.of("kN/mm", "1000"), Unit.of("N/mm", "1")),
+      List.of(Unit.of("Mlbf/in", "1e6").times(Unit.POUND).per(Unit.INCH))),
   STRESS(
-      List.of(new Unit("MPa", 1), new Unit("N/mm²", 1)),
-      List.of(new Unit("ksi", 1000 * Unit.PSI), new Unit("psi", Unit.PSI))),
+      List.of(Unit.of("MPa", "1"), Unit.of("N/mm²", "1")),
+      List.of(Unit.psi("ksi", "1000"), Unit.psi("psi", "1"))),
   MODULUS(
-      List.of(new Unit("GPa", 1000), new Unit("MPa", 1)),
-      List.of(new Unit("Mpsi", 1e6 * Unit.PSI), new Unit("ksi", 1000 * Unit.PSI))),
+      List.of(Unit.of("GPa", "1000"), Unit.of("MPa", "1")),
+      List.of(Unit.psi("Mpsi", "1e6"), Unit.psi("ksi", "1000"))),
   ANGLE(
-      List.of(new Unit("°", Math.PI / 180), new Unit("deg", Math.PI / 180), new Unit("rad", 1)),
-      List.of(new Unit("°", Math.PI / 180))),
-  RATIO(List.of(new Unit("", 1), new Unit("%", 0.01)), List.of(new Unit("", 1)));
-
-  /**
-   * A unit.
-   *
-   * @param symbol as shown and typed
-   * @param size how much of the inside unit it is
-   */
-  record Unit(String symbol, double size) {
-    static final double INCH = 25.4;
-    static final double POUND = 4.4482216152605;
-    static final double PSI = POUND / (INCH * INCH);
-  }
+      List.of(Unit.of("°", Unit.DEGREE), Unit.of("deg", Unit.DEGREE), Unit.of("rad", "1")),
+      List.of(Unit.of("°", Unit.DEGREE))),
+  RATIO(List.of(Unit.of("", "1"), Unit.of("%", "0.01")), List.of(Unit.of("", "1")));
 
   private final List<Unit> metric;
   private final List<Unit> inch;

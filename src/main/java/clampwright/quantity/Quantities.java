@@ -9,6 +9,9 @@ public final class Quantities {
   private static final char MINUS = '\u2212';
   private static final char THIN_SPACE = '\u2009';
 
+  /** One more than a double needs, for the way through a conversion. */
+  private static final int MOST_FIGURES = 18;
+
   private Quantities() {}
 
   /** The unit as shown, such as {@code kN/mm}; empty for a ratio. */
@@ -21,9 +24,13 @@ public final class Quantities {
     return value / dimension.shown(system).size();
   }
 
-  /** Value inside the program from one in the shown unit. */
+  /**
+   * Value inside the program from one in the shown unit, taken for the decimal that it prints as:
+   * 0.007 in is 0.1778 mm.
+   */
   public static double inside(Dimension dimension, UnitSystem system, double shown) {
-    return shown * dimension.shown(system).size();
+    Unit unit = dimension.shown(system);
+    return Double.isFinite(shown) ? unit.inside(BigDecimal.valueOf(shown)) : shown * unit.size();
   }
 
   /**
@@ -53,12 +60,23 @@ public final class Quantities {
   }
 
   /**
-   * What an input field shows, no unit: the shortest text that reads back as the same value, or, if
-   * only rounding tells them apart, as one equal to fourteen figures.
+   * The shortest text, no unit, that reads back as exactly the same value: 6.5, and for 6.35 mm
+   * 0.25 in inches. A number that is not finite has no such text and is shown as it is.
    */
   public static String field(Dimension dimension, UnitSystem system, double value) {
-    BigDecimal shown = new BigDecimal(shown(dimension, system, value)).round(new MathContext(14));
-    return shown.signum() == 0 ? "0" : shown.stripTrailingZeros().toPlainString();
+    if (!Double.isFinite(value)) {
+      return Double.toString(value);
+    }
+    Unit unit = dimension.shown(system);
+    BigDecimal shown = unit.shown(value);
+    BigDecimal text = shown;
+    for (int figures = 1; figures <= MOST_FIGURES; figures++) {
+      text = shown.round(new MathContext(figures));
+      if (unit.inside(text) == value) {
+        break;
+      }
+    }
+    return text.signum() == 0 ? "0" : text.stripTrailingZeros().toPlainString();
   }
 
   private static String withUnit(String number, Dimension dimension, UnitSystem system) {

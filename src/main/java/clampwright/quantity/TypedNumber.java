@@ -1,5 +1,8 @@
 package clampwright.quantity;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -28,14 +31,18 @@ final class TypedNumber {
     if (unit != null && unit.matches("[.,].*")) {
       return new Reading.Wrong("One decimal mark only, and none between thousands: 1234.5");
     }
-    Optional<Dimension.Unit> known = unit(unit, dimension, system);
+    Optional<Unit> known = unit(unit, dimension, system);
     if (known.isEmpty()) {
       return new Reading.Wrong(
           "'" + unit + "' is no unit here; such as " + example(dimension, system) + ".");
     }
-    double value = magnitude(form) * known.get().size();
+    if (form.group("under") != null && new BigDecimal(form.group("under")).signum() == 0) {
+      return new Reading.Wrong("'" + trimmed + "' divides by 0; such as 1/4.");
+    }
+    double value = known.get().inside(magnitude(form));
     if (!Double.isFinite(value)) {
-      return new Reading.Wrong("'" + trimmed + "' is not a number that can be used.");
+      return new Reading.Wrong(
+          "'" + trimmed + "' is too large; such as " + example(dimension, system) + ".");
     }
     return new Reading.Value(negative(form) ? -value : value);
   }
@@ -45,19 +52,20 @@ final class TypedNumber {
     return sign != null && !sign.equals("+");
   }
 
-  private static double magnitude(Matcher form) {
+  private static BigDecimal magnitude(Matcher form) {
     if (form.group("over") != null) {
-      double whole = form.group("whole") == null ? 0 : Double.parseDouble(form.group("whole"));
-      return whole
-          + Double.parseDouble(form.group("over")) / Double.parseDouble(form.group("under"));
+      String whole = form.group("whole") == null ? "0" : form.group("whole");
+      BigDecimal part =
+          new BigDecimal(form.group("over"))
+              .divide(new BigDecimal(form.group("under")), MathContext.DECIMAL128);
+      return new BigDecimal(whole).add(part);
     }
     String power = form.group("power") == null ? "" : form.group("power");
-    return Double.parseDouble(form.group("decimal").replace(',', '.') + power);
+    return new BigDecimal(form.group("decimal").replace(',', '.') + power);
   }
 
   /** The unit meant: the reader's system first, so that a symbol known to both stays in it. */
-  private static Optional<Dimension.Unit> unit(
-      String typed, Dimension dimension, UnitSystem system) {
+  private static Optional<Unit> unit(String typed, Dimension dimension, UnitSystem system) {
     if (typed == null) {
       return Optional.of(dimension.shown(system));
     }
@@ -66,8 +74,7 @@ final class TypedNumber {
     return find(symbol, dimension, system).or(() -> find(symbol, dimension, other));
   }
 
-  private static Optional<Dimension.Unit> find(
-      String symbol, Dimension dimension, UnitSystem system) {
+  private static Optional<Unit> find(String symbol, Dimension dimension, UnitSystem system) {
     return dimension.units(system).stream()
         .filter(unit -> !unit.symbol().isEmpty() && plain(unit.symbol()).equals(symbol))
         .findFirst();
@@ -77,7 +84,7 @@ final class TypedNumber {
   private static String plain(String symbol) {
     return symbol
         .strip()
-        .toLowerCase(java.util.Locale.ROOT)
+        .toLowerCase(Locale.ROOT)
         .replace("²", "2")
         .replace("^2", "2")
         .replace("\u03bc", "µ")
