@@ -21,6 +21,12 @@ import java.util.List;
 record ClampFaces(
     double headDiameter, double nutDiameter, WasherDecision headWasher, WasherDecision nutWasher) {
 
+  /** The faces that a solved joint's zone lies between. */
+  static ClampFaces of(Zone zone) {
+    return new ClampFaces(
+        zone.headFaceDiameter(), zone.nutFaceDiameter(), zone.headWasher(), zone.nutWasher());
+  }
+
   /** The faces of head and nut themselves, as if there were no washers. */
   static ClampFaces bare(Joint joint) {
     double head = joint.fastener().head().bearingDiameter();

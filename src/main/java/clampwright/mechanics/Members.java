@@ -78,9 +78,7 @@ final class Members {
     if (!HalfAngle.inRange(angle)) {
       return new NotApplicable(Why.ANGLE_OUT_OF_RANGE);
     }
-    double nutRadius = proportions.tapped() ? Double.POSITIVE_INFINITY : faces.nutDiameter() / 2;
-    double tan = Math.tan(angle);
-    PressureZone vdi = PressureZone.of(clamped, faces.headDiameter() / 2, nutRadius, tan, tan);
+    PressureZone vdi = VdiSpring.zone(proportions, faces, clamped);
     for (int i = 0; i < clamped.size(); i++) {
       if (vdi.smallestRadius(i) <= clamped.get(i).hole() / 2) {
         return new NotApplicable(Why.NO_BEARING);

@@ -19,10 +19,7 @@ public record VdiProportions(
 
   /** The proportions of a solved joint. */
   public static VdiProportions of(Joint joint, Zone zone) {
-    ClampFaces faces =
-        new ClampFaces(
-            zone.headFaceDiameter(), zone.nutFaceDiameter(), zone.headWasher(), zone.nutWasher());
-    return of(joint, faces, Slice.of(joint));
+    return of(joint, ClampFaces.of(zone), Slice.of(joint));
   }
 
   static VdiProportions of(Joint joint, ClampFaces faces, List<Slice> slices) {

@@ -3,7 +3,7 @@ package clampwright.mechanics;
 import clampwright.joint.Outline;
 
 /** The area that a disc of the pressure zone has inside an outline, less the hole. */
-final class ZoneArea {
+public final class ZoneArea {
   private ZoneArea() {}
 
   /**
@@ -35,7 +35,7 @@ final class ZoneArea {
    *
    * @param chord distance of the chord from the centre [mm], 0 or more
    */
-  static double segment(double radius, double chord) {
+  public static double segment(double radius, double chord) {
     if (radius <= chord) {
       return 0;
     }
