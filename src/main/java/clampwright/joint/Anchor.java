@@ -17,9 +17,9 @@ public sealed interface Anchor {
       implements Anchor {
     public Nut {
       Objects.requireNonNull(standard, "standard");
-      Check.positive("bearing face diameter", bearingDiameter);
-      Check.positive("nut height", height);
-      Check.positive("nut width", width);
+      Check.positive("bearing face diameter", "mm", bearingDiameter);
+      Check.positive("nut height", "mm", height);
+      Check.positive("nut width", "mm", width);
     }
 
     public Nut withBearingDiameter(double bearingDiameter) {

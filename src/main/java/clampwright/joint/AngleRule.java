@@ -17,8 +17,8 @@ public sealed interface AngleRule {
    */
   record Typed(double headDegrees, double nutDegrees) implements AngleRule {
     public Typed {
-      Check.finite("half-angle", headDegrees);
-      Check.finite("half-angle", nutDegrees);
+      Check.finite("half-angle", "°", headDegrees);
+      Check.finite("half-angle", "°", nutDegrees);
     }
   }
 

@@ -24,8 +24,8 @@ public record Element(
   public Element {
     Objects.requireNonNull(name, "name");
     Objects.requireNonNull(kind, "kind");
-    Check.positive("thickness", thickness);
-    Check.positive("hole", hole);
+    Check.positive("thickness", "mm", thickness);
+    Check.positive("hole", "mm", hole);
     Objects.requireNonNull(outline, "outline");
     Objects.requireNonNull(material, "material");
   }

@@ -31,10 +31,10 @@ public record Fastener(
     Objects.requireNonNull(thread, "thread");
     Objects.requireNonNull(head, "head");
     Objects.requireNonNull(anchor, "anchor");
-    length.ifPresent(value -> Check.positive("bolt length", value));
-    shankLength.ifPresent(value -> Check.notNegative("shank length", value));
-    shankDiameter.ifPresent(value -> Check.positive("shank diameter", value));
-    Check.notNegative("bore", bore);
+    length.ifPresent(value -> Check.positive("bolt length", "mm", value));
+    shankLength.ifPresent(value -> Check.notNegative("shank length", "mm", value));
+    shankDiameter.ifPresent(value -> Check.positive("shank diameter", "mm", value));
+    Check.notNegative("bore", "mm", bore);
     Objects.requireNonNull(strength, "strength");
     Objects.requireNonNull(material, "material");
   }

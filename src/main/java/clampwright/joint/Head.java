@@ -25,10 +25,10 @@ public record Head(
   public Head {
     Objects.requireNonNull(style, "style");
     Objects.requireNonNull(standard, "standard");
-    Check.positive("bearing face diameter", bearingDiameter);
-    Check.positive("head height", height);
-    Check.positive("head width", width);
-    Check.positive("flange diameter", rim);
+    Check.positive("bearing face diameter", "mm", bearingDiameter);
+    Check.positive("head height", "mm", height);
+    Check.positive("head width", "mm", width);
+    Check.positive("flange diameter", "mm", rim);
   }
 
   public Head withBearingDiameter(double bearingDiameter) {

@@ -8,7 +8,7 @@ package clampwright.joint;
  */
 public record Load(double axial, double introduction) {
   public Load {
-    Check.finite("axial load", axial);
+    Check.finite("axial load", "N", axial);
     Check.between("load-introduction factor", 0, introduction, 1);
   }
 

@@ -27,8 +27,8 @@ public record Material(
   public Material {
     Objects.requireNonNull(name, "name");
     Objects.requireNonNull(family, "family");
-    Check.positive("modulus", modulus);
+    Check.positive("modulus", "MPa", modulus);
     poisson.ifPresent(value -> Check.between("Poisson's ratio", 0, value, 0.4999));
-    expansion.ifPresent(value -> Check.finite("expansion", value));
+    expansion.ifPresent(value -> Check.finite("expansion", "1/K", value));
   }
 }

@@ -37,7 +37,7 @@ public record Method(
 
   public Method {
     Objects.requireNonNull(angle, "angle");
-    bodyDiameter.ifPresent(value -> Check.positive("body diameter", value));
+    bodyDiameter.ifPresent(value -> Check.positive("body diameter", "mm", value));
     Objects.requireNonNull(stiffness, "stiffness");
     Objects.requireNonNull(threadArea, "threadArea");
   }

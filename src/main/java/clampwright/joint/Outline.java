@@ -13,7 +13,7 @@ public sealed interface Outline {
    */
   record Round(double diameter) implements Outline {
     public Round {
-      Check.positive("outside diameter", diameter);
+      Check.positive("outside diameter", "mm", diameter);
     }
   }
 
@@ -25,8 +25,8 @@ public sealed interface Outline {
    */
   record Strip(double left, double right) implements Outline {
     public Strip {
-      Check.positive("edge distance, left", left);
-      Check.positive("edge distance, right", right);
+      Check.positive("edge distance, left", "mm", left);
+      Check.positive("edge distance, right", "mm", right);
     }
   }
 

@@ -7,6 +7,6 @@ package clampwright.joint;
  */
 public record Preload(double force) {
   public Preload {
-    Check.notNegative("preload", force);
+    Check.notNegative("preload", "N", force);
   }
 }

@@ -21,11 +21,10 @@ public record ScrewThread(String designation, Form form, double diameter, double
   public ScrewThread {
     Objects.requireNonNull(designation, "designation");
     Objects.requireNonNull(form, "form");
-    Check.positive("thread diameter", diameter);
-    Check.positive("pitch", pitch);
+    Check.positive("thread diameter", "mm", diameter);
+    Check.positive("pitch", "mm", pitch);
     if (pitch > diameter / 2) {
-      throw new IllegalArgumentException(
-          "pitch must be at most half the thread diameter, not " + pitch);
+      throw Check.refused("pitch", "mm", pitch, "must be at most half the thread diameter");
     }
   }
 

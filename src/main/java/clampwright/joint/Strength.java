@@ -17,8 +17,8 @@ public record Strength(
   public Strength {
     Objects.requireNonNull(standard, "standard");
     Objects.requireNonNull(grade, "grade");
-    proof.ifPresent(value -> Check.positive("proof strength", value));
-    yield.ifPresent(value -> Check.positive("yield strength", value));
-    Check.positive("tensile strength", tensile);
+    proof.ifPresent(value -> Check.positive("proof strength", "MPa", value));
+    yield.ifPresent(value -> Check.positive("yield strength", "MPa", value));
+    Check.positive("tensile strength", "MPa", tensile);
   }
 }
