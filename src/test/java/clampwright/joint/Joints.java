@@ -1,0 +1,171 @@
+package clampwright.joint;
+
+import clampwright.quantity.UnitSystem;
+import java.util.OptionalDouble;
+import net.jqwik.api.Arbitraries;
+import net.jqwik.api.Arbitrary;
+import net.jqwik.api.Combinators;
+
+/**
+ * Random joints for property tests. They are all that the records allow, with every positive number
+ * a double can be; most have no solution.
+ */
+public final class Joints {
+  private Joints() {}
+
+  /** Any finite double, zeros of both signs among them. */
+  public static Arbitrary<Double> finite() {
+    Arbitrary<Double> bits = Arbitraries.longs().map(Double::longBitsToDouble);
+    return Arbitraries.frequencyOf(
+            net.jqwik.api.Tuple.of(4, bits),
+            net.jqwik.api.Tuple.of(4, Arbitraries.doubles().between(-1e6, 1e6).ofScale(6)),
+            net.jqwik.api.Tuple.of(1, Arbitraries.of(0.0, -0.0, 0.1, 1.0 / 3, 1e15, -1e15, 25.4)))
+        .filter(Double::isFinite);
+  }
+
+  /** Any double above 0. */
+  public static Arbitrary<Double> positive() {
+    return finite().map(Math::abs).filter(value -> value > 0);
+  }
+
+  private static Arbitrary<Double> notNegative() {
+    return finite().map(Math::abs);
+  }
+
+  private static Arbitrary<Double> share() {
+    return Arbitraries.oneOf(
+        Arbitraries.of(0.0, 0.25, 0.4999), Arbitraries.doubles().between(0, 0.4999).ofScale(12));
+  }
+
+  private static Arbitrary<OptionalDouble> optional(Arbitrary<Double> values) {
+    return Arbitraries.oneOf(
+        Arbitraries.just(OptionalDouble.empty()), values.map(OptionalDouble::of));
+  }
+
+  /** Any text, also such as no keyboard types. */
+  public static Arbitrary<String> text() {
+    return Arbitraries.oneOf(
+        Arbitraries.of("", "Cover", "Flansch außen", "\"</script>\\ \u2028\n\t", "\uD83D\uDD29"),
+        Arbitraries.strings().ofMaxLength(12));
+  }
+
+  public static Arbitrary<Material> materials() {
+    return Combinators.combine(
+            text(),
+            Arbitraries.of(Material.Family.class),
+            positive(),
+            optional(share()),
+            optional(finite()))
+        .as(Material::new);
+  }
+
+  public static Arbitrary<Outline> outlines() {
+    return Arbitraries.oneOf(
+        Arbitraries.just(Outline.WIDE),
+        positive().map(Outline.Round::new),
+        Combinators.combine(positive(), positive()).as(Outline.Strip::new));
+  }
+
+  public static Arbitrary<Element> elements() {
+    return Combinators.combine(
+            text(),
+            Arbitraries.of(Element.Kind.class),
+            positive(),
+            positive(),
+            outlines(),
+            materials())
+        .as(Element::new);
+  }
+
+  public static Arbitrary<ScrewThread> threads() {
+    return Combinators.combine(
+            text(), Arbitraries.of(ScrewThread.Form.class), positive(), positive())
+        .filter((name, form, diameter, pitch) -> pitch / 2 <= diameter / 8)
+        .as((name, form, diameter, pitch) -> new ScrewThread(name, form, diameter, pitch));
+  }
+
+  private static Arbitrary<Head> heads() {
+    return Combinators.combine(
+            Arbitraries.of(Head.Style.class),
+            text(),
+            positive(),
+            positive(),
+            positive(),
+            positive())
+        .as(Head::new);
+  }
+
+  private static Arbitrary<Anchor> anchors() {
+    return Arbitraries.oneOf(
+        Arbitraries.just(new Anchor.Tapped()),
+        Combinators.combine(text(), positive(), positive(), positive()).as(Anchor.Nut::new));
+  }
+
+  private static Arbitrary<Strength> strengths() {
+    return Combinators.combine(
+            text(), text(), optional(positive()), optional(positive()), positive())
+        .as(Strength::new);
+  }
+
+  public static Arbitrary<Fastener> fasteners() {
+    Arbitrary<OptionalDouble> lengths = optional(positive());
+    return Combinators.combine(
+            Combinators.combine(threads(), heads(), anchors())
+                .as((thread, head, anchor) -> new Object[] {thread, head, anchor}),
+            lengths,
+            optional(notNegative()),
+            lengths,
+            notNegative(),
+            strengths(),
+            materials())
+        .as(
+            (ends, length, shank, diameter, bore, strength, material) ->
+                new Fastener(
+                    (ScrewThread) ends[0],
+                    (Head) ends[1],
+                    (Anchor) ends[2],
+                    length,
+                    shank,
+                    diameter,
+                    bore,
+                    strength,
+                    material));
+  }
+
+  private static Arbitrary<AngleRule> angleRules() {
+    return Arbitraries.oneOf(
+        Arbitraries.of(AngleRule.FIXED_45, AngleRule.FIXED_30, AngleRule.VDI_2230),
+        Combinators.combine(finite(), finite()).as(AngleRule.Typed::new));
+  }
+
+  public static Arbitrary<Method> methods() {
+    return Combinators.combine(
+            angleRules(),
+            optional(positive()),
+            Arbitraries.of(StiffnessMethod.class),
+            Arbitraries.of(true, false),
+            Arbitraries.of(Method.ThreadArea.class))
+        .as(Method::new);
+  }
+
+  /** Any joint, of up to six elements. */
+  public static Arbitrary<Joint> any() {
+    Arbitrary<WasherRule> rules = Arbitraries.of(WasherRule.class);
+    Arbitrary<Load> loads =
+        Combinators.combine(finite(), share().map(share -> 1 - share)).as(Load::new);
+    return Combinators.combine(
+            fasteners(),
+            elements().list().ofMaxSize(6),
+            rules,
+            rules,
+            methods(),
+            notNegative().map(Preload::new),
+            loads)
+        .as(Joint::new);
+  }
+
+  /** Any sketch. */
+  public static Arbitrary<Sketch> sketches() {
+    return Combinators.combine(text(), any(), Arbitraries.of(UnitSystem.class)).as(Sketch::new);
+  }
+}
