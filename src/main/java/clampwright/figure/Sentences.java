@@ -1,0 +1,179 @@
+package clampwright.figure;
+
+import clampwright.joint.AngleRule;
+import clampwright.joint.StiffnessMethod;
+import clampwright.joint.WasherRule;
+import clampwright.mechanics.BoltStiffness;
+import clampwright.mechanics.Notice;
+import clampwright.mechanics.Reason;
+import clampwright.mechanics.Side;
+import clampwright.mechanics.Zone.WasherDecision;
+import clampwright.quantity.Dimension;
+import clampwright.quantity.Quantities;
+import clampwright.quantity.UnitSystem;
+
+/** Findings in words, in the reader's units. */
+public final class Sentences {
+  /** The caution that goes with every picture and every result. */
+  public static final String CAUTION =
+      "Early sizing aid: concentric load, elastic parts. Where failure can hurt someone, local"
+          + " codes, licensed practice and test decide.";
+
+  private Sentences() {}
+
+  public static String reason(Reason reason, UnitSystem units) {
+    return switch (reason.cause()) {
+      case EMPTY_STACK -> "Nothing is clamped yet: draw a layer.";
+      case FACE_INSIDE_HOLE ->
+          "Hole "
+              + second(reason, units)
+              + " is not smaller than the clamp face "
+              + first(reason, units)
+              + ".";
+      case NO_BEARING ->
+          "Hole "
+              + second(reason, units)
+              + " is not smaller than the pressure zone "
+              + first(reason, units)
+              + " here.";
+      case OUTLINE_INSIDE_HOLE ->
+          "Outside diameter "
+              + first(reason, units)
+              + " is not larger than the hole "
+              + second(reason, units)
+              + ".";
+      case EDGE_INSIDE_HOLE ->
+          "Edge at "
+              + first(reason, units)
+              + " lies inside the hole, radius "
+              + second(reason, units)
+              + ".";
+      case ANGLE_OUT_OF_RANGE ->
+          "Half-angle "
+              + Quantities.trimmed(Dimension.ANGLE, units, Math.toRadians(reason.values().get(0)))
+              + "° is outside 5° … 60°.";
+      case BODY_DIAMETER_NEEDED ->
+          "The VDI 2230 angle needs the body's outside diameter: every layer is wide.";
+      case HOLE_NARROWER_THAN_BOLT ->
+          "Bolt " + first(reason, units) + " does not pass the hole " + second(reason, units) + ".";
+      case BOLT_TOO_SHORT ->
+          "Bolt length "
+              + first(reason, units)
+              + " does not reach through the grip "
+              + second(reason, units)
+              + ".";
+      case BORE_TOO_WIDE ->
+          "Bore "
+              + first(reason, units)
+              + " leaves no wall in the bolt, "
+              + second(reason, units)
+              + ".";
+      case TAPPED_WASHER -> "A tapped thread needs a layer at the end, not a washer.";
+      case METHOD_NOT_APPLICABLE ->
+          "The chosen stiffness method does not apply: it "
+              + reason.why().orElseThrow().text()
+              + ".";
+    };
+  }
+
+  private static String first(Reason reason, UnitSystem units) {
+    return length(reason.values().get(0), units);
+  }
+
+  private static String second(Reason reason, UnitSystem units) {
+    return length(reason.values().get(1), units);
+  }
+
+  private static String length(double value, UnitSystem units) {
+    return Quantities.trimmedText(Dimension.LENGTH, units, value);
+  }
+
+  public static String notice(Notice notice) {
+    return switch (notice.kind()) {
+      case CONE_NOT_REDUCED_BEHIND_STRIP ->
+          "The edge cuts the zone here; the cone behind it is not reduced (unconservative).";
+      case SHORT_ENGAGEMENT -> "The thread is not fully engaged; a longer bolt would be.";
+      case SHANK_LONGER_THAN_GRIP -> "The plain shank reaches past the grip; counted up to it.";
+      case SHANK_WIDER_THAN_HOLE -> "The shank is wider than the hole it passes.";
+      case PARTED -> "The axial load parts the joint; the bolt alone carries it.";
+    };
+  }
+
+  public static String method(StiffnessMethod method) {
+    return switch (method) {
+      case MID_PLANE_CYLINDERS -> "mid-plane cylinders";
+      case FULL_FRUSTA -> "full frusta";
+      case VDI_2230 -> "VDI 2230";
+      case WILEMAN -> "Wileman 1991";
+    };
+  }
+
+  /** The method's name where room is short. */
+  public static String shortMethod(StiffnessMethod method) {
+    return switch (method) {
+      case MID_PLANE_CYLINDERS -> "mid-plane";
+      case FULL_FRUSTA -> "frusta";
+      case VDI_2230 -> "VDI";
+      case WILEMAN -> "Wileman";
+    };
+  }
+
+  public static String side(Side side) {
+    return switch (side) {
+      case HEAD -> "head";
+      case NUT -> "nut";
+      case BOTH -> "both";
+    };
+  }
+
+  public static String angleRule(AngleRule rule) {
+    if (rule instanceof AngleRule.Typed) {
+      return "typed";
+    }
+    if (rule instanceof AngleRule.Vdi2230) {
+      return "VDI 2230";
+    }
+    return rule instanceof AngleRule.Fixed30 ? "30° fixed" : "45° fixed";
+  }
+
+  public static String washerRule(WasherRule rule) {
+    return switch (rule) {
+      case AUTOMATIC -> "automatic";
+      case WHOLE_WASHER -> "whole washer";
+      case FROM_THE_HEADS_EDGE -> "from the head's edge";
+    };
+  }
+
+  /** What became of a washer, and why. */
+  public static String washerDecision(WasherDecision decision, UnitSystem units) {
+    if (decision.taken() == WasherDecision.Taken.NO_WASHER) {
+      return "no washer";
+    }
+    boolean whole = decision.taken() == WasherDecision.Taken.WHOLE_WASHER;
+    String taken = whole ? "whole washer" : "from the head's edge";
+    if (!decision.automatic()) {
+      return taken + ", as set";
+    }
+    String overhang =
+        Double.isInfinite(decision.overhang())
+            ? "no round edge"
+            : length(decision.overhang(), units);
+    return taken
+        + ": overhang "
+        + overhang
+        + (whole ? " ≤ " : " > ")
+        + "t·tan α "
+        + length(decision.limit(), units);
+  }
+
+  public static String spring(BoltStiffness.Kind kind) {
+    return switch (kind) {
+      case HEAD -> "head";
+      case SHANK -> "shank";
+      case THREAD_IN_GRIP -> "thread in the grip";
+      case ENGAGED_THREAD -> "engaged thread";
+      case NUT -> "nut";
+      case TAPPED_THREAD -> "tapped thread";
+    };
+  }
+}
