@@ -1,0 +1,162 @@
+package clampwright.app;
+
+import clampwright.figure.Sentences;
+import clampwright.joint.AngleRule;
+import clampwright.joint.Element;
+import clampwright.joint.Joint;
+import clampwright.joint.Sketch;
+import clampwright.joint.StiffnessMethod;
+import clampwright.mechanics.Assessment.Solved;
+import clampwright.mechanics.ElementFinding;
+import clampwright.mechanics.LoadSharing;
+import clampwright.mechanics.MemberStiffness;
+import clampwright.mechanics.Side;
+import clampwright.mechanics.Zone;
+import com.google.gson.Gson;
+import com.google.gson.GsonBuilder;
+import com.google.gson.JsonArray;
+import com.google.gson.JsonObject;
+
+/** The readouts as JSON, in mm, mm², N, N/mm, degrees. */
+final class FoundJson {
+  private static final Gson GSON =
+      new GsonBuilder().setPrettyPrinting().disableHtmlEscaping().create();
+
+  private FoundJson() {}
+
+  static String of(Sketch sketch, Solved solved) {
+    Joint joint = sketch.joint();
+    JsonObject root = new JsonObject();
+    root.addProperty("name", sketch.name());
+    root.add("angle", angle(joint.method().angle(), solved.zone()));
+    root.add("zone", zone(solved.zone()));
+    root.add("elements", elements(joint, solved));
+    root.add("memberStiffness", members(solved.members()));
+    root.addProperty("chosenMethod", word(joint.method().stiffness()));
+    root.addProperty("boltStiffness", solved.bolt().stiffness());
+    addLoads(root, solved.sharing());
+    root.add("notices", notices(joint, solved));
+    root.addProperty("caution", Sentences.CAUTION);
+    return GSON.toJson(root) + "\n";
+  }
+
+  /** The preload has no scatter yet: one value stands for the band. */
+  private static void addLoads(JsonObject root, LoadSharing sharing) {
+    JsonObject preload = new JsonObject();
+    preload.addProperty("min", sharing.preload());
+    preload.addProperty("nominal", sharing.preload());
+    preload.addProperty("max", sharing.preload());
+    JsonObject load = new JsonObject();
+    load.addProperty("axial", sharing.axial());
+    root.addProperty("loadFactor", sharing.loadFactor());
+    root.add("preload", preload);
+    root.add("load", load);
+    root.addProperty("boltLoad", sharing.boltLoad());
+    root.addProperty("clampLoad", sharing.clampLoad());
+    root.addProperty("partingLoad", sharing.partingLoad());
+  }
+
+  private static JsonObject angle(AngleRule rule, Zone zone) {
+    JsonObject json = new JsonObject();
+    json.addProperty("rule", word(rule));
+    json.addProperty("headDegrees", Math.toDegrees(zone.headHalfAngle()));
+    json.addProperty("nutDegrees", Math.toDegrees(zone.nutHalfAngle()));
+    return json;
+  }
+
+  private static String word(AngleRule rule) {
+    if (rule instanceof AngleRule.Typed) {
+      return "typed";
+    }
+    if (rule instanceof AngleRule.Vdi2230) {
+      return "vdi2230";
+    }
+    return rule instanceof AngleRule.Fixed30 ? "fixed30" : "fixed45";
+  }
+
+  private static JsonObject zone(Zone zone) {
+    JsonObject json = new JsonObject();
+    json.addProperty("length", zone.length());
+    json.addProperty("headFaceDiameter", zone.headFaceDiameter());
+    json.addProperty("nutFaceDiameter", zone.nutFaceDiameter());
+    json.addProperty("headWasherRule", word(zone.headWasher()));
+    json.addProperty("nutWasherRule", word(zone.nutWasher()));
+    return json;
+  }
+
+  /** The rule as it was taken, also where it was left to the program. */
+  private static String word(Zone.WasherDecision decision) {
+    return switch (decision.taken()) {
+      case NO_WASHER -> "noWasher";
+      case WHOLE_WASHER -> "wholeWasher";
+      case FROM_THE_HEADS_EDGE -> "headEdge";
+    };
+  }
+
+  private static JsonArray elements(Joint joint, Solved solved) {
+    JsonArray elements = new JsonArray();
+    for (int i = 0; i < solved.elements().size(); i++) {
+      elements.add(element(joint.elements().get(i), solved.elements().get(i)));
+    }
+    return elements;
+  }
+
+  private static JsonObject element(Element element, ElementFinding finding) {
+    JsonObject json = new JsonObject();
+    json.addProperty("name", element.name());
+    json.addProperty("kind", element.isWasher() ? "washer" : "layer");
+    json.addProperty("thickness", element.thickness());
+    json.addProperty("clampedThickness", finding.clampedThickness());
+    json.addProperty("depthFromHead", finding.depthFromHead());
+    json.addProperty("depthFromNut", finding.depthFromNut());
+    json.addProperty("governing", word(finding.governing()));
+    json.addProperty("edgeLimited", finding.edgeLimited());
+    json.addProperty("edgeClipped", finding.edgeClipped());
+    json.addProperty("effectiveDiameter", finding.effectiveDiameter());
+    json.addProperty("area", finding.area());
+    json.addProperty("stiffness", finding.stiffness());
+    return json;
+  }
+
+  /** For programs: these words stay when those for readers change. */
+  private static String word(Side side) {
+    return switch (side) {
+      case HEAD -> "head";
+      case NUT -> "nut";
+      case BOTH -> "both";
+    };
+  }
+
+  private static JsonObject members(MemberStiffness members) {
+    JsonObject json = new JsonObject();
+    for (StiffnessMethod method : StiffnessMethod.values()) {
+      JsonObject result = new JsonObject();
+      if (members.get(method) instanceof MemberStiffness.Value value) {
+        result.addProperty("stiffness", value.stiffness());
+        result.addProperty("loadFactor", value.loadFactor());
+      } else if (members.get(method) instanceof MemberStiffness.NotApplicable not) {
+        result.addProperty("notApplicable", not.why().text());
+      }
+      json.add(word(method), result);
+    }
+    return json;
+  }
+
+  private static String word(StiffnessMethod method) {
+    return switch (method) {
+      case MID_PLANE_CYLINDERS -> "midPlaneCylinders";
+      case FULL_FRUSTA -> "fullFrusta";
+      case VDI_2230 -> "vdi2230";
+      case WILEMAN -> "wileman";
+    };
+  }
+
+  private static JsonArray notices(Joint joint, Solved solved) {
+    JsonArray notices = new JsonArray();
+    solved
+        .notices()
+        .forEach(
+            notice -> notices.add(Places.told(notice.part(), joint, Sentences.notice(notice))));
+    return notices;
+  }
+}
