@@ -58,6 +58,7 @@ final class CommandLineTool {
   static int run(PrintStream out, PrintStream err, String... arguments) {
     return new CommandLine(new CommandLineTool())
         .addSubcommand(new FoundCommand(out, err))
+        .setExpandAtFiles(false)
         .setOut(new PrintWriter(out, true))
         .setErr(new PrintWriter(err, true))
         .execute(arguments);

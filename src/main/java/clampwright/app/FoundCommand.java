@@ -10,7 +10,9 @@ import clampwright.store.Stored;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.concurrent.Callable;
+import java.util.stream.Collectors;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -49,12 +51,19 @@ final class FoundCommand implements Callable<Integer> {
   public Integer call() {
     Stored stored = SketchFile.read(file);
     if (stored instanceof Stored.Refused refused) {
-      complain(String.join("; ", refused.problems()));
+      complain(line(refused.problems()));
       return UNREADABLE;
     }
     Stored.Opened opened = (Stored.Opened) stored;
     opened.remarks().forEach(this::complain);
     return found(opened.sketch());
+  }
+
+  /** One line, however many problems there are. */
+  private static String line(List<String> problems) {
+    int most = 10;
+    String told = problems.stream().limit(most).collect(Collectors.joining("; "));
+    return problems.size() > most ? told + "; and more" : told;
   }
 
   private int found(Sketch sketch) {

@@ -16,6 +16,8 @@ import com.google.gson.Gson;
 import com.google.gson.GsonBuilder;
 import com.google.gson.JsonArray;
 import com.google.gson.JsonObject;
+import java.math.BigDecimal;
+import java.math.MathContext;
 
 /** The readouts as JSON, in mm, mm², N, N/mm, degrees. */
 final class FoundJson {
@@ -33,7 +35,7 @@ final class FoundJson {
     root.add("elements", elements(joint, solved));
     root.add("memberStiffness", members(solved.members()));
     root.addProperty("chosenMethod", word(joint.method().stiffness()));
-    root.addProperty("boltStiffness", solved.bolt().stiffness());
+    number(root, "boltStiffness", solved.bolt().stiffness());
     addLoads(root, solved.sharing());
     root.add("notices", notices(joint, solved));
     root.addProperty("caution", Sentences.CAUTION);
@@ -43,24 +45,24 @@ final class FoundJson {
   /** The preload has no scatter yet: one value stands for the band. */
   private static void addLoads(JsonObject root, LoadSharing sharing) {
     JsonObject preload = new JsonObject();
-    preload.addProperty("min", sharing.preload());
-    preload.addProperty("nominal", sharing.preload());
-    preload.addProperty("max", sharing.preload());
+    number(preload, "min", sharing.preload());
+    number(preload, "nominal", sharing.preload());
+    number(preload, "max", sharing.preload());
     JsonObject load = new JsonObject();
-    load.addProperty("axial", sharing.axial());
-    root.addProperty("loadFactor", sharing.loadFactor());
+    number(load, "axial", sharing.axial());
+    number(root, "loadFactor", sharing.loadFactor());
     root.add("preload", preload);
     root.add("load", load);
-    root.addProperty("boltLoad", sharing.boltLoad());
-    root.addProperty("clampLoad", sharing.clampLoad());
-    root.addProperty("partingLoad", sharing.partingLoad());
+    number(root, "boltLoad", sharing.boltLoad());
+    number(root, "clampLoad", sharing.clampLoad());
+    number(root, "partingLoad", sharing.partingLoad());
   }
 
   private static JsonObject angle(AngleRule rule, Zone zone) {
     JsonObject json = new JsonObject();
     json.addProperty("rule", word(rule));
-    json.addProperty("headDegrees", Math.toDegrees(zone.headHalfAngle()));
-    json.addProperty("nutDegrees", Math.toDegrees(zone.nutHalfAngle()));
+    number(json, "headDegrees", Math.toDegrees(zone.headHalfAngle()));
+    number(json, "nutDegrees", Math.toDegrees(zone.nutHalfAngle()));
     return json;
   }
 
@@ -76,9 +78,9 @@ final class FoundJson {
 
   private static JsonObject zone(Zone zone) {
     JsonObject json = new JsonObject();
-    json.addProperty("length", zone.length());
-    json.addProperty("headFaceDiameter", zone.headFaceDiameter());
-    json.addProperty("nutFaceDiameter", zone.nutFaceDiameter());
+    number(json, "length", zone.length());
+    number(json, "headFaceDiameter", zone.headFaceDiameter());
+    number(json, "nutFaceDiameter", zone.nutFaceDiameter());
     json.addProperty("headWasherRule", word(zone.headWasher()));
     json.addProperty("nutWasherRule", word(zone.nutWasher()));
     return json;
@@ -105,16 +107,16 @@ final class FoundJson {
     JsonObject json = new JsonObject();
     json.addProperty("name", element.name());
     json.addProperty("kind", element.isWasher() ? "washer" : "layer");
-    json.addProperty("thickness", element.thickness());
-    json.addProperty("clampedThickness", finding.clampedThickness());
-    json.addProperty("depthFromHead", finding.depthFromHead());
-    json.addProperty("depthFromNut", finding.depthFromNut());
+    number(json, "thickness", element.thickness());
+    number(json, "clampedThickness", finding.clampedThickness());
+    number(json, "depthFromHead", finding.depthFromHead());
+    number(json, "depthFromNut", finding.depthFromNut());
     json.addProperty("governing", word(finding.governing()));
     json.addProperty("edgeLimited", finding.edgeLimited());
     json.addProperty("edgeClipped", finding.edgeClipped());
-    json.addProperty("effectiveDiameter", finding.effectiveDiameter());
-    json.addProperty("area", finding.area());
-    json.addProperty("stiffness", finding.stiffness());
+    number(json, "effectiveDiameter", finding.effectiveDiameter());
+    number(json, "area", finding.area());
+    number(json, "stiffness", finding.stiffness());
     return json;
   }
 
@@ -132,8 +134,8 @@ final class FoundJson {
     for (StiffnessMethod method : StiffnessMethod.values()) {
       JsonObject result = new JsonObject();
       if (members.get(method) instanceof MemberStiffness.Value value) {
-        result.addProperty("stiffness", value.stiffness());
-        result.addProperty("loadFactor", value.loadFactor());
+        number(result, "stiffness", value.stiffness());
+        number(result, "loadFactor", value.loadFactor());
       } else if (members.get(method) instanceof MemberStiffness.NotApplicable not) {
         result.addProperty("notApplicable", not.why().text());
       }
@@ -158,5 +160,12 @@ final class FoundJson {
         .forEach(
             notice -> notices.add(Places.told(notice.part(), joint, Sentences.notice(notice))));
     return notices;
+  }
+
+  /** Fourteen figures: all that the arithmetic is good for, without the noise behind them. */
+  private static void number(JsonObject json, String key, double value) {
+    BigDecimal rounded = new BigDecimal(value).round(new MathContext(14)).stripTrailingZeros();
+    boolean plain = rounded.scale() < 0 && rounded.scale() > -16;
+    json.addProperty(key, plain ? rounded.setScale(0) : rounded);
   }
 }

@@ -15,8 +15,8 @@ import java.util.List;
 public final class SketchFile {
   public static final String EXTENSION = ".joint.json";
 
-  /** [bytes]; no honest sketch comes near this. */
-  static final int LARGEST = 20_000_000;
+  /** [bytes]; a thousand layers come to a tenth of it. */
+  static final int LARGEST = 4_000_000;
 
   private SketchFile() {}
 
@@ -32,7 +32,7 @@ public final class SketchFile {
     try (InputStream in = Files.newInputStream(path)) {
       byte[] bytes = in.readNBytes(LARGEST + 1);
       return bytes.length > LARGEST
-          ? refused("This file is too large to be a sketch (over 20 MB).")
+          ? refused("This file is too large to be a sketch (over 4 MB).")
           : SketchJson.read(text(bytes));
     } catch (IOException trouble) {
       return refused(FileTrouble.reading(trouble));

@@ -5,10 +5,11 @@ import java.util.OptionalDouble;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
 import net.jqwik.api.Combinators;
+import net.jqwik.api.Tuple;
 
 /**
- * Random joints for property tests. They are all that the records allow, with every positive number
- * a double can be; most have no solution.
+ * Random joints for property tests: {@link #any} is all that the records allow, with every number a
+ * double can be, and mostly without a solution; {@link #fitting} mostly has one.
  */
 public final class Joints {
   private Joints() {}
@@ -17,9 +18,9 @@ public final class Joints {
   public static Arbitrary<Double> finite() {
     Arbitrary<Double> bits = Arbitraries.longs().map(Double::longBitsToDouble);
     return Arbitraries.frequencyOf(
-            net.jqwik.api.Tuple.of(4, bits),
-            net.jqwik.api.Tuple.of(4, Arbitraries.doubles().between(-1e6, 1e6).ofScale(6)),
-            net.jqwik.api.Tuple.of(1, Arbitraries.of(0.0, -0.0, 0.1, 1.0 / 3, 1e15, -1e15, 25.4)))
+            Tuple.of(4, bits),
+            Tuple.of(4, Arbitraries.doubles().between(-1e6, 1e6).ofScale(6)),
+            Tuple.of(1, Arbitraries.of(0.0, -0.0, 0.1, 1.0 / 3, 1e15, -1e15, 25.4)))
         .filter(Double::isFinite);
   }
 
@@ -132,15 +133,15 @@ public final class Joints {
                     material));
   }
 
-  private static Arbitrary<AngleRule> angleRules() {
+  private static Arbitrary<AngleRule> angleRules(Arbitrary<Double> degrees) {
     return Arbitraries.oneOf(
         Arbitraries.of(AngleRule.FIXED_45, AngleRule.FIXED_30, AngleRule.VDI_2230),
-        Combinators.combine(finite(), finite()).as(AngleRule.Typed::new));
+        Combinators.combine(degrees, degrees).as(AngleRule.Typed::new));
   }
 
   public static Arbitrary<Method> methods() {
     return Combinators.combine(
-            angleRules(),
+            angleRules(finite()),
             optional(positive()),
             Arbitraries.of(StiffnessMethod.class),
             Arbitraries.of(true, false),
@@ -162,6 +163,80 @@ public final class Joints {
             notNegative().map(Preload::new),
             loads)
         .as(Joint::new);
+  }
+
+  /** Joints whose parts fit each other: most of them have a solution. */
+  public static Arbitrary<Joint> fitting() {
+    Arbitrary<Fastener> bolts =
+        Combinators.combine(between(1, 80), between(1.2, 2.5), between(1.2, 2.5), anchors())
+            .as(Joints::fittingBolt);
+    return bolts.flatMap(
+        bolt ->
+            Combinators.combine(
+                    fittingElements(bolt.thread().diameter()).list().ofMinSize(1).ofMaxSize(6),
+                    Arbitraries.of(WasherRule.class),
+                    angleRules(between(5, 60)),
+                    Arbitraries.of(
+                        StiffnessMethod.MID_PLANE_CYLINDERS, StiffnessMethod.FULL_FRUSTA),
+                    between(0, 1e6),
+                    between(-1e6, 1e6))
+                .as(
+                    (elements, rule, angle, method, force, axial) ->
+                        new Joint(
+                            bolt,
+                            elements,
+                            rule,
+                            rule,
+                            Method.USUAL.withAngle(angle).withStiffness(method),
+                            new Preload(force),
+                            new Load(axial, 1))));
+  }
+
+  private static Fastener fittingBolt(double d, double headFace, double nutFace, Anchor anchor) {
+    OptionalDouble none = OptionalDouble.empty();
+    boolean tapped = anchor instanceof Anchor.Tapped;
+    return new Fastener(
+        new ScrewThread("", ScrewThread.Form.METRIC, d, 0.15 * d),
+        new Head(Head.Style.HEXAGON, "", headFace * d, d, 1.6 * d, 1.6 * d),
+        tapped ? anchor : new Anchor.Nut("", nutFace * d, 0.8 * d, 1.6 * d),
+        none,
+        none,
+        none,
+        0,
+        new Strength("", "", none, none, 800),
+        new Material("", Material.Family.STEEL, 206_000, none, none));
+  }
+
+  private static Arbitrary<Element> fittingElements(double d) {
+    Arbitrary<Outline> outlines =
+        Arbitraries.oneOf(
+            Arbitraries.just(Outline.WIDE),
+            between(1.3, 6).map(share -> new Outline.Round(share * d)),
+            Combinators.combine(between(0.7, 4), between(0.7, 4))
+                .as((left, right) -> new Outline.Strip(left * d, right * d)));
+    Arbitrary<Material> materials =
+        between(1, 1e6)
+            .map(
+                modulus ->
+                    new Material(
+                        "",
+                        Material.Family.OTHER,
+                        modulus,
+                        OptionalDouble.empty(),
+                        OptionalDouble.empty()));
+    return Combinators.combine(
+            Arbitraries.of(Element.Kind.class),
+            between(0.01, 10),
+            between(1, 1.15),
+            outlines,
+            materials)
+        .as(
+            (kind, thickness, hole, outline, material) ->
+                new Element("", kind, thickness * d, hole * d, outline, material));
+  }
+
+  private static Arbitrary<Double> between(double low, double high) {
+    return Arbitraries.doubles().between(low, high).ofScale(6);
   }
 
   /** Any sketch. */

@@ -77,7 +77,7 @@ class SketchFileTest {
     Files.write(file(), Texts.SHORTEST.getBytes(StandardCharsets.UTF_16));
     checkRefused("This is not a sketch file: its text is not UTF-8.", file());
     Files.write(file(), new byte[SketchFile.LARGEST + 1]);
-    checkRefused("This file is too large to be a sketch (over 20 MB).", file());
+    checkRefused("This file is too large to be a sketch (over 4 MB).", file());
   }
 
   @Test

@@ -11,6 +11,7 @@ import java.util.Random;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
 import net.jqwik.api.Combinators;
+import net.jqwik.api.EdgeCasesMode;
 import net.jqwik.api.Example;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
@@ -86,12 +87,12 @@ class WildTextTest {
     }
   }
 
-  @Property(tries = 3000)
+  @Property(tries = 3000, edgeCases = EdgeCasesMode.NONE)
   void mutatedSketchesAreAnswered(@ForAll("texts") String text) {
     checkAnswer(text);
   }
 
-  @Property(tries = 500)
+  @Property(tries = 500, edgeCases = EdgeCasesMode.NONE)
   void anyTextIsAnswered(@ForAll String text) {
     checkAnswer(text);
   }
