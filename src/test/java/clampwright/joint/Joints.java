@@ -81,7 +81,7 @@ public final class Joints {
   public static Arbitrary<ScrewThread> threads() {
     return Combinators.combine(
             text(), Arbitraries.of(ScrewThread.Form.class), positive(), positive())
-        .filter((name, form, diameter, pitch) -> pitch / 2 <= diameter / 8)
+        .filter((name, form, diameter, pitch) -> pitch <= diameter / 4)
         .as((name, form, diameter, pitch) -> new ScrewThread(name, form, diameter, pitch));
   }
 

@@ -1,0 +1,110 @@
+package clampwright.figure.working;
+
+import clampwright.figure.Sentences;
+import clampwright.joint.Part;
+import clampwright.joint.StiffnessMethod;
+import clampwright.mechanics.LoadSharing;
+import clampwright.mechanics.MemberStiffness.Value;
+import clampwright.quantity.Dimension;
+import java.util.ArrayList;
+import java.util.List;
+
+/** Load factor, parting load, bolt load and clamp load. */
+record SharingWorking(Found found) {
+
+  Working loadFactor() {
+    StiffnessMethod chosen = found.joint().method().stiffness();
+    List<Step> steps = new ArrayList<>();
+    steps.add(factor("Load factor Φ, " + Sentences.method(chosen), chosen));
+    for (StiffnessMethod method : StiffnessMethod.values()) {
+      if (method != chosen && found.solved().members().get(method) instanceof Value) {
+        steps.add(factor("Beside it, " + Sentences.method(method), method));
+      }
+    }
+    return new Working("Load factor Φ", steps);
+  }
+
+  private Step factor(String label, StiffnessMethod method) {
+    Value value = (Value) found.solved().members().get(method);
+    Numbers numbers = found.numbers();
+    String bolt = numbers.stiffness(found.solved().bolt().stiffness());
+    return new Step(
+        label,
+        "n·k_b/(k_b + k_m)",
+        "%s × %s / (%s + %s)"
+            .formatted(
+                numbers.ratio(found.joint().load().introduction()),
+                bolt,
+                bolt,
+                numbers.stiffness(value.stiffness())),
+        numbers.result(Dimension.RATIO, value.loadFactor()),
+        Source.SHARING);
+  }
+
+  Working partingLoad() {
+    Numbers numbers = found.numbers();
+    LoadSharing sharing = sharing();
+    Step parting =
+        new Step(
+            "Parts at",
+            "F_p/(1 − Φ), pulling loads only",
+            numbers.force(sharing.preload())
+                + " / (1 − "
+                + numbers.ratio(sharing.loadFactor(), 1 - sharing.loadFactor())
+                + ")",
+            numbers.forceResult(sharing.partingLoad()),
+            Source.SHARING);
+    return withNotices("Parting load", chosenFactor(), parting);
+  }
+
+  Working boltLoad() {
+    return withNotices("Bolt load", chosenFactor(), boltStep(), clampStep());
+  }
+
+  Working clampLoad() {
+    return withNotices("Clamp load", chosenFactor(), boltStep(), clampStep());
+  }
+
+  private Working withNotices(String title, Step... steps) {
+    List<Step> all = new ArrayList<>(List.of(steps));
+    all.addAll(found.notices(Part.LOAD::equals));
+    return new Working(title, all);
+  }
+
+  private Step chosenFactor() {
+    StiffnessMethod chosen = found.joint().method().stiffness();
+    return factor("Load factor Φ, " + Sentences.method(chosen), chosen);
+  }
+
+  private Step boltStep() {
+    Numbers numbers = found.numbers();
+    LoadSharing sharing = sharing();
+    String axial = numbers.force(sharing.axial());
+    return new Step(
+        "Bolt load F_b",
+        "max(F_p + Φ·F_A, F_A, 0)",
+        "max(%s + %s × %s, %s, 0)"
+            .formatted(
+                numbers.force(sharing.preload()),
+                numbers.ratio(sharing.loadFactor()),
+                axial,
+                axial),
+        numbers.forceResult(sharing.boltLoad()),
+        Source.SHARING);
+  }
+
+  private Step clampStep() {
+    Numbers numbers = found.numbers();
+    LoadSharing sharing = sharing();
+    return new Step(
+        "Clamp load F_c",
+        "F_b − F_A",
+        numbers.force(sharing.boltLoad()) + " − " + numbers.force(sharing.axial()),
+        numbers.forceResult(sharing.clampLoad()),
+        Source.EQUILIBRIUM);
+  }
+
+  private LoadSharing sharing() {
+    return found.solved().sharing();
+  }
+}

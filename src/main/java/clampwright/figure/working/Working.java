@@ -1,0 +1,49 @@
+package clampwright.figure.working;
+
+import clampwright.figure.Sentences;
+import clampwright.joint.Joint;
+import clampwright.joint.Part;
+import clampwright.mechanics.Assessment;
+import clampwright.mechanics.Assessment.Solved;
+import clampwright.mechanics.Assessment.Unsolved;
+import clampwright.quantity.UnitSystem;
+import java.util.List;
+
+/**
+ * The arithmetic behind a part or a readout. A joint without a solution has a working without
+ * numbers: the reasons.
+ *
+ * @param title what is worked out
+ * @param steps in the order in which a person would do them
+ */
+public record Working(String title, List<Step> steps) {
+  public Working {
+    steps = List.copyOf(steps);
+  }
+
+  /** The working of a selected part; of the member stiffness where nothing is selected. */
+  public static Working of(Part part, Joint joint, Assessment assessment, UnitSystem units) {
+    return assessment instanceof Solved solved
+        ? new PartWorking(new Found(joint, solved, new Numbers(units))).of(part)
+        : unsolved(joint, (Unsolved) assessment, units);
+  }
+
+  /** The working of a readout. */
+  public static Working of(
+      Headline headline, Joint joint, Assessment assessment, UnitSystem units) {
+    return assessment instanceof Solved solved
+        ? new PartWorking(new Found(joint, solved, new Numbers(units))).of(headline)
+        : unsolved(joint, (Unsolved) assessment, units);
+  }
+
+  private static Working unsolved(Joint joint, Unsolved unsolved, UnitSystem units) {
+    return new Working(
+        "No solution yet",
+        unsolved.reasons().stream()
+            .map(
+                reason ->
+                    Step.remark(
+                        PartNames.of(reason.part(), joint), Sentences.reason(reason, units), ""))
+            .toList());
+  }
+}
