@@ -13,6 +13,8 @@ final class Heads {
   /** d_w over head diameter of ISO 4762 heads, where a socket head's table gives no face. */
   private static final double FACE_SHARE = 0.955;
 
+  private static final String GRADE_B = ", grade B";
+
   private Heads() {}
 
   static Map<String, List<Entry<Head>>> read() {
@@ -44,8 +46,13 @@ final class Heads {
   }
 
   private static String standard(CSVRecord row) {
-    String grade = row.get("grade").equals("B") ? ", grade B" : "";
+    String grade = row.get("grade").equals("B") ? GRADE_B : "";
     return row.get("standard") + grade;
+  }
+
+  /** Whether two heads are of one standard; large sizes come in product grade B only. */
+  static boolean sameStandard(Head one, Head other) {
+    return one.standard().replace(GRADE_B, "").equals(other.standard().replace(GRADE_B, ""));
   }
 
   private static Head.Style style(String standard) {

@@ -2,6 +2,7 @@ package clampwright.catalog;
 
 import clampwright.joint.Material;
 import clampwright.joint.Material.Family;
+import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -9,12 +10,15 @@ import org.apache.commons.csv.CSVRecord;
 
 /** Reads the materials; those without a modulus cannot be used and are left out. */
 final class Materials {
+  private static final BigDecimal PER_GPA = new BigDecimal("1000");
+  private static final BigDecimal PER_MILLION = new BigDecimal("0.000001");
+
   private Materials() {}
 
   static List<Entry<Material>> read() {
     List<Entry<Material>> materials = new ArrayList<>();
     for (CSVRecord row : Table.read("materials")) {
-      OptionalDouble modulus = Table.number(row, "E_GPa");
+      OptionalDouble modulus = Table.scaled(row, "E_GPa", PER_GPA);
       if (modulus.isPresent()) {
         materials.add(entry(row, modulus.getAsDouble()));
       }
@@ -28,17 +32,13 @@ final class Materials {
         new Material(
             name,
             family(name),
-            modulus * 1000,
+            modulus,
             Table.number(row, "poisson"),
-            scaled(Table.number(row, "CTE_1e-6_per_K")));
+            Table.scaled(row, "CTE_1e-6_per_K", PER_MILLION));
     String provenance =
         "E " + row.get("E_provenance") + ", expansion " + orNone(row.get("CTE_provenance"));
     String source = row.get("E_source") + "; " + orNone(row.get("CTE_source"));
     return new Entry<>(name, family(name).name(), material, source, provenance);
-  }
-
-  private static OptionalDouble scaled(OptionalDouble perMillion) {
-    return perMillion.isPresent() ? OptionalDouble.of(perMillion.getAsDouble() / 1e6) : perMillion;
   }
 
   private static String orNone(String text) {

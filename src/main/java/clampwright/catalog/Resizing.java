@@ -34,7 +34,7 @@ record Resizing(Catalogue catalogue, Fastener fastener, ScrewThread thread) {
     Head old = fastener.head();
     List<Head> heads = catalogue.heads(thread).stream().map(Entry::value).toList();
     return heads.stream()
-        .filter(head -> head.standard().equals(old.standard()))
+        .filter(head -> Heads.sameStandard(head, old))
         .findFirst()
         .or(() -> heads.stream().filter(head -> head.style() == old.style()).findFirst())
         .orElseGet(() -> scaled(old));

@@ -4,13 +4,10 @@ import clampwright.joint.ScrewThread;
 import clampwright.joint.Strength;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.OptionalDouble;
 import org.apache.commons.csv.CSVRecord;
 
 /** Reads the strength classes and tells which hold for a thread. */
 final class Strengths {
-  private static final double KSI = 1000 * 4.4482216152605 / (25.4 * 25.4);
-
   /** A class with the range of sizes it holds for. */
   private record Ranged(Entry<Strength> entry, String range) {}
 
@@ -61,19 +58,14 @@ final class Strengths {
   }
 
   private static Entry<Strength> entry(CSVRecord row) {
-    double unit = row.get("unit").equals("ksi") ? KSI : 1;
     Strength strength =
         new Strength(
             row.get("standard"),
             row.get("class"),
-            scaled(Table.number(row, "proof_strength"), unit),
-            scaled(Table.number(row, "yield_or_Rp02_min"), unit),
-            Table.number(row, "tensile_min").orElseThrow() * unit);
+            Table.stress(row, "proof_strength"),
+            Table.stress(row, "yield_or_Rp02_min"),
+            Table.stress(row, "tensile_min").orElseThrow());
     return new Entry<>(
         row.get("class"), row.get("standard"), strength, row.get("source"), row.get("provenance"));
-  }
-
-  private static OptionalDouble scaled(OptionalDouble value, double unit) {
-    return value.isPresent() ? OptionalDouble.of(value.getAsDouble() * unit) : value;
   }
 }

@@ -8,8 +8,6 @@ import org.apache.commons.csv.CSVRecord;
 
 /** Reads the thread tables. */
 final class Threads {
-  private static final double INCH = 25.4;
-
   private Threads() {}
 
   static List<Entry<ScrewThread>> read() {
@@ -47,8 +45,8 @@ final class Threads {
         new ScrewThread(
             row.get("designation"),
             ScrewThread.Form.UNIFIED,
-            Double.parseDouble(row.get("D_in")) * INCH,
-            INCH / Double.parseDouble(row.get("tpi")));
+            Table.scaled(row, "D_in", Table.INCH).orElseThrow(),
+            Table.INCH.doubleValue() / Double.parseDouble(row.get("tpi")));
     return new Entry<>(
         row.get("designation"),
         row.get("series"),

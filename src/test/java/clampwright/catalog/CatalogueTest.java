@@ -6,10 +6,14 @@ import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import clampwright.joint.Anchor;
+import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Head;
+import clampwright.joint.Joint;
 import clampwright.joint.Material;
 import clampwright.joint.ScrewThread;
+import clampwright.store.Samples;
+import clampwright.store.Stored;
 import java.util.stream.Stream;
 import org.apache.commons.csv.CSVRecord;
 import org.junit.jupiter.api.Test;
@@ -52,6 +56,22 @@ class CatalogueTest {
     // The table prints three to four figures: half a unit of its last place comes on top.
     double lastPlace = Math.pow(10, -new java.math.BigDecimal(row.get("At_published_in2")).scale());
     assertEquals(published, inches, 0.002 * published + 0.5 * lastPlace);
+  }
+
+  /** ASME B1.1 basic pitch diameters, to half of the table's last place. */
+  @ParameterizedTest
+  @MethodSource("unifiedThreads")
+  void unifiedPitchDiametersAgreeWithTheirTable(CSVRecord row) {
+    ScrewThread thread = thread(row.get("designation"));
+    double published = Double.parseDouble(row.get("pitch_dia_in"));
+    assertEquals(published, thread.pitchDiameter() / 25.4, 6e-5);
+  }
+
+  /** Inch sizes come over without the dust of binary multiplication. */
+  @ParameterizedTest
+  @CsvSource({"3/8-16 UNC, 9.525", "3/4-10 UNC, 19.05", "#4-40 UNC, 2.8448"})
+  void inchSizesAreExact(String size, double expected) {
+    assertEquals(expected, thread(size).diameter());
   }
 
   /** The constants of ISO 898-1 and ASME B1.1 are not interchangeable: 0.4 to 1.8 % apart. */
@@ -162,6 +182,52 @@ class CatalogueTest {
     Fastener beyond = catalogue.resized(larger, thread("M39"));
     assertEquals("own size", beyond.head().standard());
     assertNotEquals(24, beyond.head().width());
+  }
+
+  /** M30 heads come in product grade B only; back at M16 the usual grade A is meant. */
+  @Test
+  void resizingThereAndBackKeepsTheUsualHead() {
+    Fastener start = catalogue.resized(catalogue.usualFastener(), thread("M16"));
+    Fastener larger = catalogue.resized(start, thread("M30"));
+    assertTrue(larger.head().standard().endsWith("grade B"));
+    assertEquals(start, catalogue.resized(larger, thread("M16")));
+  }
+
+  /** A typed value has no origin; one that equals a table's has that table's. */
+  @Test
+  void originsAreThoseOfTheTables() {
+    ScrewThread m10 = thread("M10");
+    Head hexagon = head("M10", Head.Style.HEXAGON);
+    assertEquals(
+        "ISO 4014/4017 hex · published table", catalogue.originOf(m10, hexagon).orElseThrow());
+    assertTrue(catalogue.originOf(m10, hexagon.withBearingDiameter(14)).isEmpty());
+    assertTrue(catalogue.originOf(m10, new Washer(10.5, 20, 2)).isPresent());
+    assertTrue(catalogue.originOf(m10, new Washer(10.5, 21, 2)).isEmpty());
+  }
+
+  @ParameterizedTest
+  @MethodSource("samples")
+  void samplesUseTheTables(Joint joint) {
+    ScrewThread thread = joint.fastener().thread();
+    checkOrigin(thread, thread);
+    checkOrigin(thread, joint.fastener().head());
+    checkOrigin(thread, joint.fastener().strength());
+    if (joint.fastener().anchor() instanceof Anchor.Nut nut) {
+      checkOrigin(thread, nut);
+    }
+    for (Element element : joint.elements()) {
+      Material material = element.material();
+      catalogue.material(material.name()).ifPresent(entry -> assertEquals(entry.value(), material));
+    }
+  }
+
+  static Stream<Joint> samples() {
+    return Samples.all().stream()
+        .map(sample -> ((Stored.Opened) Samples.open(sample)).sketch().joint());
+  }
+
+  private void checkOrigin(ScrewThread thread, Object value) {
+    assertTrue(catalogue.originOf(thread, value).isPresent(), value::toString);
   }
 
   private Head head(String size, Head.Style style) {
