@@ -154,13 +154,12 @@ public final class Sentences {
     if (!decision.automatic()) {
       return taken + ", as set";
     }
-    String overhang =
-        Double.isInfinite(decision.overhang())
-            ? "no round edge"
-            : length(decision.overhang(), units);
+    if (Double.isInfinite(decision.overhang())) {
+      return taken + ": the washer has no round edge";
+    }
     return taken
         + ": overhang "
-        + overhang
+        + length(decision.overhang(), units)
         + (whole ? " ≤ " : " > ")
         + "t·tan α "
         + length(decision.limit(), units);
