@@ -43,6 +43,12 @@ public final class Quantities {
         String.format(Locale.ROOT, "%." + decimals(dimension, system, shown) + "f", shown));
   }
 
+  /** A number of a column: as many decimals as its neighbours have. */
+  public static String number(Dimension dimension, UnitSystem system, double value, int decimals) {
+    double shown = shown(dimension, system, value);
+    return grouped(String.format(Locale.ROOT, "%." + decimals + "f", shown));
+  }
+
   /** A readout with its unit. */
   public static String text(Dimension dimension, UnitSystem system, double value) {
     return withUnit(number(dimension, system, value), dimension, system);
