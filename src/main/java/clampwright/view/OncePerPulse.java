@@ -1,0 +1,48 @@
+package clampwright.view;
+
+import javafx.application.Platform;
+import javafx.beans.Observable;
+import javafx.scene.Node;
+import javafx.scene.Scene;
+
+/**
+ * Brings a pane up to date once before the next frame, however often its sources change until then.
+ * Outside a scene it does so at once.
+ */
+public final class OncePerPulse {
+  private final Node node;
+  private final Runnable update;
+  private final Runnable pulse = this::pulse;
+  private Scene waiting;
+
+  private OncePerPulse(Node node, Runnable update) {
+    this.node = node;
+    this.update = update;
+  }
+
+  /** Runs the update now and after every change of the sources. */
+  public static void keep(Node node, Runnable update, Observable... sources) {
+    OncePerPulse keeper = new OncePerPulse(node, update);
+    for (Observable source : sources) {
+      source.subscribe(keeper::changed);
+    }
+    update.run();
+  }
+
+  private void changed() {
+    Scene scene = node.getScene();
+    if (scene == null) {
+      update.run();
+    } else if (waiting == null) {
+      waiting = scene;
+      scene.addPreLayoutPulseListener(pulse);
+      Platform.requestNextPulse();
+    }
+  }
+
+  private void pulse() {
+    waiting.removePreLayoutPulseListener(pulse);
+    waiting = null;
+    update.run();
+  }
+}

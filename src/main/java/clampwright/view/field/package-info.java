@@ -1,0 +1,2 @@
+/** Fields for one value of the sketch each, in the reader's units. */
+package clampwright.view.field;
