@@ -16,6 +16,7 @@ final class EditorStart {
     // The toolkit warns that it was started from a class path, which a plain jar means to do.
     TOOLKIT.setLevel(Level.SEVERE);
     Thread.setDefaultUncaughtExceptionHandler((thread, trouble) -> tell(trouble, System.err));
+    ClampwrightApp.prepare();
     Application.launch(ClampwrightApp.class, arguments);
   }
 

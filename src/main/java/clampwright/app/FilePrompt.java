@@ -1,0 +1,18 @@
+package clampwright.app;
+
+import java.nio.file.Path;
+import java.util.Optional;
+
+/** Asks the user for a file. The window asks through the system's dialog. */
+interface FilePrompt {
+
+  /** A file to open; empty when the user would rather not. */
+  Optional<Path> toOpen();
+
+  /**
+   * A file to save to; empty when the user would rather not.
+   *
+   * @param suggested name of the file
+   */
+  Optional<Path> toSave(String suggested);
+}

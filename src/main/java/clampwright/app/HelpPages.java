@@ -1,0 +1,121 @@
+package clampwright.app;
+
+import clampwright.figure.Sentences;
+import java.util.ArrayList;
+import java.util.List;
+import javafx.geometry.Insets;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.input.KeyCombination;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.VBox;
+
+/** The pages of the help menu. */
+final class HelpPages {
+  private HelpPages() {}
+
+  /** What is computed, and where it ends. */
+  static Node method() {
+    return text(
+        heading("The pressure zone"),
+        paragraph(
+            "From each clamp face a cone opens at the half-angle. A round edge holds it; behind a"
+                + " narrow part it starts again from that edge. Straight edges cut its area but do"
+                + " not hold it: behind them it is not reduced, which is unconservative and is said"
+                + " where it happens. The zone at any depth is the smaller of the two cones; the"
+                + " face it belongs to governs there."),
+        heading("Member stiffness"),
+        paragraph(
+            "Mid-plane cylinders: one cylinder per part, as wide as the zone at its mid-plane (the"
+                + " practitioner's effective diameter). Full frusta: the exact integral over the"
+                + " zone (Shigley eq. 8-19). VDI 2230: full frusta at the angle it computes from"
+                + " the proportions. Wileman, Choudhury, Green 1991: an exponential fit, for one"
+                + " material without edges. Formulas of VDI 2230 and Wileman are quoted from"
+                + " memory."),
+        heading("Bolt stiffness and load"),
+        paragraph(
+            "The bolt is springs in series: head, shank, thread in the grip, engaged thread, nut"
+                + " or tapped thread. Φ = n·k_b/(k_b + k_m); the bolt carries F_p + Φ·F_A until"
+                + " the joint parts at F_p/(1 − Φ), then all of F_A."),
+        heading("Washers"),
+        paragraph(
+            "A washer that overhangs the face by no more than t·tan α acts whole: the zone begins"
+                + " at its inner side with its outside diameter (common practice, no source)."
+                + " Otherwise the cone starts at the head's edge and fans through it. Either can"
+                + " be set per side."),
+        heading("Limits"),
+        paragraph(
+            "Concentric load, one bolt, elastic members; no prying, no gasket curve, no plate"
+                + " bending. The cone itself is an assumption: taken at 45° with one cylinder per"
+                + " part, members can come out two to four times too stiff, worst with one thick"
+                + " part. Then the load factor is too small, which is unsafe for the bolt's"
+                + " strength and fatigue. Look at the spread over methods, not at one number."));
+  }
+
+  static Node about() {
+    return text(
+        heading("Clampwright"),
+        paragraph("Draw a bolted stack, see its pressure cones, read its stiffness."),
+        paragraph(Sentences.CAUTION),
+        paragraph(
+            "Table values carry their source and how sure it is; rest the pointer on a field to"
+                + " see it. Some are from memory and say so."),
+        paragraph(
+            "Built with OpenJFX, AtlantaFX, Gson, Apache Commons CSV, picocli and the Liberation"
+                + " fonts, under their licences."));
+  }
+
+  /** Every key, from the bindings themselves. */
+  static Node keys(Commands commands) {
+    GridPane grid = new GridPane();
+    grid.getStyleClass().add("keys");
+    grid.setHgap(28);
+    grid.setVgap(5);
+    int[] row = {0};
+    commands
+        .menus()
+        .forEach(
+            (menu, list) -> {
+              Label heading = heading(menu);
+              GridPane.setMargin(heading, new Insets(row[0] == 0 ? 0 : 10, 0, 2, 0));
+              grid.add(heading, 0, row[0]++, 2, 1);
+              for (Command command : list) {
+                if (!command.keys().isEmpty()) {
+                  grid.add(new Label(command.text().get()), 0, row[0]);
+                  grid.add(new Label(names(command.keys())), 1, row[0]++);
+                }
+              }
+            });
+    VBox page = new VBox(grid);
+    page.getStyleClass().add("help-page");
+    return page;
+  }
+
+  private static String names(List<KeyCombination> keys) {
+    List<String> names = new ArrayList<>();
+    for (KeyCombination combination : keys) {
+      names.add(combination.getDisplayText());
+    }
+    return String.join("  or  ", names);
+  }
+
+  private static Node text(Node... parts) {
+    VBox page = new VBox(6, parts);
+    page.getStyleClass().add("help-page");
+    return page;
+  }
+
+  private static Label heading(String text) {
+    Label label = new Label(text);
+    label.getStyleClass().add("help-heading");
+    return label;
+  }
+
+  private static Label paragraph(String text) {
+    Label label = new Label(text);
+    label.setWrapText(true);
+    label.setMaxWidth(560);
+    label.getStyleClass().add("help-text");
+    return label;
+  }
+}

@@ -1,0 +1,188 @@
+package clampwright.app;
+
+import clampwright.edit.SketchModel;
+import clampwright.view.field.Typed;
+import java.io.File;
+import java.nio.file.Path;
+import java.util.Optional;
+import javafx.application.Platform;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+import javafx.event.Event;
+import javafx.scene.Node;
+import javafx.scene.Parent;
+import javafx.scene.Scene;
+import javafx.scene.input.DragEvent;
+import javafx.scene.input.TransferMode;
+import javafx.stage.Stage;
+
+/** The window of the editor: what it does when asked by menu, key, mouse or system. */
+final class MainWindow implements Documents.Desk {
+  private final Stage stage;
+  private final SketchModel model;
+  private final Settings settings;
+  private final Documents documents;
+  private final WindowLayout layout;
+  private final StringProperty hint = new SimpleStringProperty("");
+  private final Scene scene;
+
+  /** A window with the system's dialogs. */
+  static MainWindow on(Stage stage, SketchModel model, Settings settings) {
+    FilePrompt prompt = new SystemFilePrompt(stage, () -> settings.recent().stream().findFirst());
+    return new MainWindow(stage, model, settings, prompt, new Dialogs(stage));
+  }
+
+  MainWindow(
+      Stage stage, SketchModel model, Settings settings, FilePrompt prompt, Questions questions) {
+    this.stage = stage;
+    this.model = model;
+    this.settings = settings;
+    Settings.Values values = settings.values();
+    documents = new Documents(model, prompt, questions, settings, this);
+    layout = new WindowLayout(model, settings, this::tools, hint);
+    scene = new Scene(layout.root(), values.width, values.height);
+    scene.addEventHandler(DragEvent.DRAG_OVER, this::draggedOver);
+    scene.addEventHandler(DragEvent.DRAG_DROPPED, this::dropped);
+    Looks.showFirst(scene, values.dark);
+    showOn(stage, values);
+    layout.start(scene);
+  }
+
+  private ToolRow tools() {
+    Commands commands = new WindowCommands(this, model, documents).commands();
+    commands.listen(scene);
+    return new ToolRow(model, new Menus(commands, documents, settings).bar(), this::switchLook);
+  }
+
+  private void showOn(Stage stage, Settings.Values values) {
+    stage.setScene(scene);
+    stage.setMinWidth(1000);
+    stage.setMinHeight(640);
+    stage.setWidth(values.width);
+    stage.setHeight(values.height);
+    stage.setMaximized(values.maximized);
+    stage
+        .titleProperty()
+        .bind(model.sketchProperty().map(sketch -> sketch.name() + " — Clampwright"));
+    stage.setOnCloseRequest(this::closing);
+  }
+
+  Documents documents() {
+    return documents;
+  }
+
+  /** Whether all parts of the window are there. */
+  boolean isComplete() {
+    return layout.isComplete();
+  }
+
+  Stage stage() {
+    return stage;
+  }
+
+  Drawer drawer() {
+    return layout.drawer();
+  }
+
+  private void closing(Event event) {
+    if (documents.mayLeave()) {
+      remember();
+    } else {
+      event.consume();
+    }
+  }
+
+  /** Closes the window as its close button does. */
+  void close() {
+    if (documents.mayLeave()) {
+      remember();
+      stage.close();
+    }
+  }
+
+  private void remember() {
+    Settings.Values values = settings.values();
+    values.maximized = stage.isMaximized();
+    if (!values.maximized) {
+      values.width = stage.getWidth();
+      values.height = stage.getHeight();
+    }
+    values.drawerOpen = drawer().openProperty().get();
+    values.drawerHeight = drawer().getPrefHeight();
+    settings.keep();
+  }
+
+  void switchLook() {
+    boolean dark = !settings.values().dark;
+    settings.values().dark = dark;
+    layout.showLook(dark);
+    Looks.showTheme(dark);
+    Looks.showStyles(scene, dark);
+  }
+
+  boolean isDark() {
+    return settings.values().dark;
+  }
+
+  /** Undoes; text that the sketch could not take over is the last step and goes first. */
+  void undo() {
+    Typed typed = Typed.around(scene.getFocusOwner());
+    commit();
+    if (typed != null && typed.isWrong()) {
+      typed.restore();
+    } else {
+      model.undo();
+    }
+  }
+
+  void redo() {
+    commit();
+    model.redo();
+  }
+
+  @Override
+  public void commit() {
+    Typed typed = Typed.around(scene.getFocusOwner());
+    if (typed != null) {
+      typed.commit();
+    }
+  }
+
+  @Override
+  public void clear() {
+    clear(scene.getRoot());
+  }
+
+  private static void clear(Node node) {
+    if (node instanceof Typed typed) {
+      typed.restore();
+    }
+    if (node instanceof Parent parent) {
+      parent.getChildrenUnmodifiable().forEach(MainWindow::clear);
+    }
+  }
+
+  @Override
+  public void report(String sentence) {
+    hint.set(sentence);
+  }
+
+  private void draggedOver(DragEvent event) {
+    if (sketchIn(event).isPresent()) {
+      event.acceptTransferModes(TransferMode.COPY);
+      event.consume();
+    }
+  }
+
+  private void dropped(DragEvent event) {
+    Optional<Path> path = sketchIn(event);
+    event.setDropCompleted(path.isPresent());
+    event.consume();
+    // The question about unsaved work must not keep the dragging program waiting.
+    path.ifPresent(file -> Platform.runLater(() -> documents.open(file)));
+  }
+
+  private static Optional<Path> sketchIn(DragEvent event) {
+    return event.getDragboard().getFiles().stream().findFirst().map(File::toPath);
+  }
+}

@@ -1,0 +1,58 @@
+package clampwright.app;
+
+import clampwright.store.SketchFile;
+import java.io.File;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Optional;
+import java.util.function.Supplier;
+import javafx.stage.FileChooser;
+import javafx.stage.FileChooser.ExtensionFilter;
+import javafx.stage.Window;
+
+/** Asks for files by the system's dialog, starting where the last file lay. */
+final class SystemFilePrompt implements FilePrompt {
+  private final Window owner;
+  private final Supplier<Optional<Path>> last;
+
+  SystemFilePrompt(Window owner, Supplier<Optional<Path>> last) {
+    this.owner = owner;
+    this.last = last;
+  }
+
+  @Override
+  public Optional<Path> toOpen() {
+    File chosen = chooser("Open a sketch").showOpenDialog(owner);
+    return Optional.ofNullable(chosen).map(File::toPath);
+  }
+
+  @Override
+  public Optional<Path> toSave(String suggested) {
+    FileChooser chooser = chooser("Save the sketch");
+    chooser.setInitialFileName(suggested);
+    File chosen = chooser.showSaveDialog(owner);
+    return Optional.ofNullable(chosen).map(File::toPath).map(SystemFilePrompt::named);
+  }
+
+  /** Some systems leave the ending out. */
+  private static Path named(Path path) {
+    String name = path.getFileName().toString();
+    return name.contains(".") ? path : path.resolveSibling(name + SketchFile.EXTENSION);
+  }
+
+  private FileChooser chooser(String title) {
+    FileChooser chooser = new FileChooser();
+    chooser.setTitle(title);
+    chooser
+        .getExtensionFilters()
+        .setAll(
+            new ExtensionFilter("Joint sketches", "*" + SketchFile.EXTENSION, "*.json"),
+            new ExtensionFilter("All files", "*"));
+    last.get()
+        .map(Path::toAbsolutePath)
+        .map(Path::getParent)
+        .filter(Files::isDirectory)
+        .ifPresent(folder -> chooser.setInitialDirectory(folder.toFile()));
+    return chooser;
+  }
+}

@@ -1,0 +1,2 @@
+/** The program: start, window, menus, files, preferences, command line. */
+package clampwright.app;
