@@ -80,7 +80,7 @@ final class FastenerSection extends Section {
     }
   }
 
-  private static SketchChoice<ScrewThread> thread() {
+  static SketchChoice<ScrewThread> thread() {
     return new SketchChoice<>(
         "Thread",
         sketch -> Optional.of(fastener(sketch).thread()),
@@ -95,7 +95,7 @@ final class FastenerSection extends Section {
         Fields::origin);
   }
 
-  private static SketchChoice<Head> head() {
+  static SketchChoice<Head> head() {
     return new SketchChoice<>(
         "Head",
         sketch -> Optional.of(fastener(sketch).head()),
@@ -126,7 +126,7 @@ final class FastenerSection extends Section {
     };
   }
 
-  private static SketchChoice<Strength> strength() {
+  static SketchChoice<Strength> strength() {
     return new SketchChoice<>(
         "Strength class",
         sketch -> Optional.of(fastener(sketch).strength()),
@@ -148,7 +148,7 @@ final class FastenerSection extends Section {
         Fields::origin);
   }
 
-  private static SketchChoice<Anchor> anchor() {
+  static SketchChoice<Anchor> anchor() {
     return new SketchChoice<>(
         "Screwed into",
         sketch -> Optional.of(fastener(sketch).anchor()),
@@ -170,7 +170,7 @@ final class FastenerSection extends Section {
     return anchors;
   }
 
-  private static SketchNumber length() {
+  static SketchNumber length() {
     return SketchNumber.optional(
         "Bolt length",
         Dimension.LENGTH,
@@ -178,7 +178,7 @@ final class FastenerSection extends Section {
         (sketch, value) -> withFastener(sketch, bolt -> bolt.withLength(value)));
   }
 
-  private static SketchNumber shankLength() {
+  static SketchNumber shankLength() {
     return SketchNumber.optional(
         "Shank length",
         Dimension.LENGTH,
@@ -202,7 +202,7 @@ final class FastenerSection extends Section {
         (sketch, value) -> withFastener(sketch, bolt -> bolt.withBore(value)));
   }
 
-  private static SketchNumber headFace() {
+  static SketchNumber headFace() {
     return SketchNumber.required(
         "Head face diameter",
         Dimension.LENGTH,
@@ -215,7 +215,7 @@ final class FastenerSection extends Section {
     return new Head(head.style(), OWN, face, head.height(), head.width(), head.rim());
   }
 
-  private static SketchNumber nutFace() {
+  static SketchNumber nutFace() {
     return SketchNumber.sometimes(
         "Nut face diameter",
         Dimension.LENGTH,

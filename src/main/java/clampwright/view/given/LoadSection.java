@@ -12,7 +12,7 @@ final class LoadSection extends Section {
     add("Enters at n", Fields.quantity(model, "introduction", introduction()));
   }
 
-  private static SketchNumber axial() {
+  static SketchNumber axial() {
     return SketchNumber.required(
         "Axial load",
         Dimension.FORCE,
@@ -21,7 +21,7 @@ final class LoadSection extends Section {
             sketch.withJoint(joint -> joint.withLoad(joint.load().withAxial(value))));
   }
 
-  private static SketchNumber introduction() {
+  static SketchNumber introduction() {
     return SketchNumber.required(
         "Load-introduction factor",
         Dimension.RATIO,

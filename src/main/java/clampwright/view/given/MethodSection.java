@@ -137,11 +137,11 @@ final class MethodSection extends Section {
         List.of(Method.ThreadArea.values()));
   }
 
-  private static SketchChoice<WasherRule> headWasherRule() {
+  static SketchChoice<WasherRule> headWasherRule() {
     return washerRule("Washer rule at the head", Joint::headWasherRule, Joint::withHeadWasherRule);
   }
 
-  private static SketchChoice<WasherRule> nutWasherRule() {
+  static SketchChoice<WasherRule> nutWasherRule() {
     return washerRule("Washer rule at the nut", Joint::nutWasherRule, Joint::withNutWasherRule);
   }
 

@@ -27,9 +27,18 @@ final class PartSection extends Section {
   private final FieldRow right;
 
   PartSection(SketchModel model) {
+    this(model, "part");
+  }
+
+  /**
+   * The same fields once more, elsewhere.
+   *
+   * @param prefix with which their ids begin
+   */
+  PartSection(SketchModel model, String prefix) {
     super("Selected part");
     this.model = model;
-    setId("part-section");
+    setId(prefix + "-section");
     fields = new PartFields(model, () -> model.selectionProperty().get());
     name = fields.name();
     material = fields.material();
@@ -41,15 +50,14 @@ final class PartSection extends Section {
             fields.diameter(),
             fields.leftEdge(),
             fields.rightEdge());
-    name.setId("part-name");
+    name.setId(prefix + "-name");
     name.getStyleClass().add("wide-field");
     material.getStyleClass().add("wide-field");
-    material.setId("part-material");
-    outline.setId("part-outline");
-    List<String> ids =
-        List.of("part-thickness", "part-hole", "part-diameter", "part-left", "part-right");
+    material.setId(prefix + "-material");
+    outline.setId(prefix + "-outline");
+    List<String> ids = List.of("-thickness", "-hole", "-diameter", "-left", "-right");
     for (int i = 0; i < ids.size(); i++) {
-      numbers.get(i).text().setId(ids.get(i));
+      numbers.get(i).text().setId(prefix + ids.get(i));
     }
     add("Name", name);
     add("Material", material);

@@ -11,6 +11,8 @@ import java.util.Optional;
 /** What can be done, in a sentence for the status line. */
 final class Hints {
   static final String NO_WASHER = "A tapped hole leaves no room for a washer at that end.";
+  static final String WRONG_CARD =
+      "A value in the card cannot be taken over: put it right, or take it back with Esc.";
   static final String DRAW =
       "Drag down to draw a layer here, and sideways as well to give it an edge;"
           + " drag sideways alone to move the sheet.";

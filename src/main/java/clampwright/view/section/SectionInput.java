@@ -54,8 +54,12 @@ final class SectionInput {
 
   private void pressed(MouseEvent event) {
     pane.requestFocus();
-    pane.clearDesk();
     refusal = "";
+    event.consume();
+    if (!pane.clearDesk()) {
+      refuse(Hints.WRONG_CARD);
+      return;
+    }
     pointer = Pointer.of(event);
     gesture.ifPresent(this::finish);
     boolean moves =
@@ -67,7 +71,6 @@ final class SectionInput {
       Optional<Tag> tag = pane.hit(pointer);
       goOn(new Press(pane, model, pane.tool(), tag, pointer));
     }
-    event.consume();
   }
 
   /** Ends a gesture that waits for typed digits: as it stands, or else not at all. */
@@ -99,7 +102,7 @@ final class SectionInput {
     }
     boolean twice = event.getButton() == MouseButton.PRIMARY && event.getClickCount() == 2;
     if (click && twice && !model.selection().equals(Part.JOINT)) {
-      pane.openCard();
+      pane.openCard(pointer);
     }
     event.consume();
   }
@@ -168,7 +171,15 @@ final class SectionInput {
     event.consume();
   }
 
+  /** Keys typed in a card that lies on the sheet are the card's own. */
+  private boolean isForSheet(KeyEvent event) {
+    return event.getTarget() == pane;
+  }
+
   private void keyPressed(KeyEvent event) {
+    if (!isForSheet(event)) {
+      return;
+    }
     refusal = "";
     if (event.getCode() == KeyCode.SPACE && gesture.isEmpty()) {
       spaceHeld = true;
@@ -200,6 +211,9 @@ final class SectionInput {
   }
 
   private void keyReleased(KeyEvent event) {
+    if (!isForSheet(event)) {
+      return;
+    }
     boolean held = event.getCode() == KeyCode.ALT || event.getCode() == KeyCode.CONTROL;
     if (event.getCode() == KeyCode.SPACE) {
       spaceHeld = false;
@@ -213,7 +227,11 @@ final class SectionInput {
   private void keyTyped(KeyEvent event) {
     String character = event.getCharacter();
     boolean text = !character.isEmpty() && character.charAt(0) >= ' ' && character.charAt(0) != 127;
-    if (!text || event.isControlDown() || event.isAltDown() || event.isMetaDown()) {
+    if (!text
+        || !isForSheet(event)
+        || event.isControlDown()
+        || event.isAltDown()
+        || event.isMetaDown()) {
       return;
     }
     if (gesture.isEmpty()) {

@@ -71,8 +71,12 @@ final class SectionKeys {
     return true;
   }
 
-  /** Leaves the tool; without one, the selection. */
+  /** Leaves the card; without one the tool; without that the selection. */
   private boolean leave() {
+    if (pane.hasCard()) {
+      pane.clearDesk();
+      return true;
+    }
     boolean something = pane.tool() != Tool.SELECT || !model.selection().equals(Part.JOINT);
     if (pane.tool() == Tool.SELECT) {
       model.select(Part.JOINT);

@@ -44,6 +44,7 @@ public final class SectionPane extends Region {
   private final ReadOnlyStringWrapper hint = new ReadOnlyStringWrapper(this, "hint", "");
   private final SectionInput input;
   private final SectionMenu menu;
+  private final CardPlace card;
 
   private Optional<Tag> hot = Optional.empty();
   private Optional<Figure> figure = Optional.empty();
@@ -59,7 +60,8 @@ public final class SectionPane extends Region {
     focusRing.setMouseTransparent(true);
     focusRing.visibleProperty().bind(focusedProperty());
     canvas.setMouseTransparent(true);
-    getChildren().addAll(canvas, focusRing, value);
+    card = new CardPlace(this, model);
+    getChildren().addAll(canvas, focusRing, value, card.node());
     setFocusTraversable(true);
     setAccessibleRole(AccessibleRole.IMAGE_VIEW);
     setAccessibleRoleDescription("drawing");
@@ -76,7 +78,7 @@ public final class SectionPane extends Region {
             .flatMap(Window::showingProperty)
             .orElse(false);
     model.sketchProperty().when(shown).subscribe((Sketch sketch) -> changed());
-    model.selectionProperty().when(shown).subscribe((Part part) -> redraw());
+    model.selectionProperty().when(shown).subscribe((Part part) -> selected());
     model.openedProperty().when(shown).subscribe((Sketch sketch) -> viewport.beginAnew());
     viewport.sheetProperty().subscribe((Sheet sheet) -> redraw());
     tool.subscribe((Tool taken) -> redraw());
@@ -129,20 +131,37 @@ public final class SectionPane extends Region {
     }
   }
 
-  /** Puts away what lies over the sheet. */
-  void clearDesk() {
+  /** Puts away what lies over the sheet; whether that could be done. */
+  boolean clearDesk() {
     menu.hide();
+    return card.close();
   }
 
   void goOn(Gesture gesture) {
     input.goOn(gesture);
   }
 
-  void openCard() {}
+  /** Opens the card of the selected part, beside the pointer or else beside the part. */
+  void openCard(Pointer at) {
+    card.open(at);
+  }
+
+  boolean hasCard() {
+    return card.isOpen();
+  }
+
+  void openCard() {
+    openCard(besideSelection());
+  }
 
   private void changed() {
     follow |= !model.isPreviewing();
     notifyAccessibleAttributeChanged(AccessibleAttribute.TEXT);
+    redraw();
+  }
+
+  private void selected() {
+    card.follow();
     redraw();
   }
 
@@ -215,6 +234,27 @@ public final class SectionPane extends Region {
     canvas.resizeRelocate(0, 0, getWidth(), getHeight());
     focusRing.resizeRelocate(0, 0, getWidth(), getHeight());
     canvas.setFigure(figure());
+    card.layout();
+  }
+
+  @Override
+  protected double computePrefWidth(double height) {
+    return 640;
+  }
+
+  @Override
+  protected double computePrefHeight(double width) {
+    return 480;
+  }
+
+  @Override
+  protected double computeMinWidth(double height) {
+    return 200;
+  }
+
+  @Override
+  protected double computeMinHeight(double width) {
+    return 120;
   }
 
   @Override
