@@ -3,10 +3,17 @@ package clampwright.figure;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.Assessment;
+import clampwright.quantity.Dimension;
+import clampwright.quantity.Quantities;
 import java.util.Optional;
 
 /** The cross-section: hand method on the left half, the matter on the right half. */
 public final class SectionFigure {
+  private static final double LEFT_COLUMN = CallOuts.LEFT + CallOuts.WIDTH + 8;
+  private static final double TOP_MARGIN = 14;
+  private static final double BOTTOM_MARGIN = 12;
+  private static final double LARGEST_SCALE = 12;
+
   private SectionFigure() {}
 
   /**
@@ -22,11 +29,82 @@ public final class SectionFigure {
 
   /** Draws a sketch on a sheet. An unsolved joint shows its parts and the reasons, no cones. */
   public static Figure of(Sketch sketch, Assessment assessment, Sheet sheet, Options options) {
-    throw new UnsupportedOperationException("comes with the figure commit");
+    StackLayout layout = StackLayout.of(sketch.joint(), assessment);
+    Drawing drawing = new Drawing(sheet);
+    LayerDrawing layers = new LayerDrawing(drawing, layout);
+    int count = sketch.joint().elements().size();
+    for (int i = 0; i < count; i++) {
+      layers.body(i);
+    }
+    if (assessment instanceof Assessment.Solved solved) {
+      new ConeDrawing(drawing, layout, solved).fills();
+    }
+    for (int i = 0; i < count; i++) {
+      layers.edges(i);
+    }
+    new BoltDrawing(drawing, layout).draw();
+    if (assessment instanceof Assessment.Solved solved) {
+      ConeDrawing cones = new ConeDrawing(drawing, layout, solved);
+      cones.cylinders();
+      cones.flanks();
+      new CallOuts(drawing, layout, solved, sketch.units()).draw();
+    }
+    new Dimensions(drawing, layout, sketch).draw();
+    load(drawing, layout, sketch);
+    captions(drawing, count);
+    if (options.interactive()) {
+      new Handles(drawing, layout).draw(options);
+    }
+    if (assessment instanceof Assessment.Unsolved unsolved) {
+      new Problems(drawing, layout, sketch).draw(unsolved);
+    }
+    return new Figure(
+        "Cross-section of " + sketch.name(), sheet.width(), sheet.height(), drawing.marks());
+  }
+
+  private static void captions(Drawing drawing, int count) {
+    Tag tag = Tag.of(Role.CAPTION, Part.JOINT);
+    double right = drawing.sheet().width() - 3.5;
+    drawing.text(tag, CallOuts.LEFT, 5, "hand method", Mark.Anchor.START, 2.8);
+    drawing.text(tag, right, 5, "parts and dimensions", Mark.Anchor.END, 2.8);
+    if (count == 0) {
+      double x = drawing.sheet().axisX() + 14;
+      double y = drawing.sheet().headY() + 8;
+      drawing.text(tag, x, y, "press here and drag down to draw a layer", Mark.Anchor.START, 3.3);
+    }
+  }
+
+  /** Arrows at head and nut that pull the joint apart, or push it together. */
+  private static void load(Drawing drawing, StackLayout layout, Sketch sketch) {
+    double axial = sketch.joint().load().axial();
+    if (axial == 0 || layout.stack() == 0) {
+      return;
+    }
+    Tag tag = Tag.of(Role.LOAD, Part.LOAD);
+    double x = drawing.sheet().x(0.72 * layout.reach());
+    double top = drawing.sheet().y(0) - 1.5;
+    double bottom = drawing.sheet().y(layout.stack()) + 1.5;
+    boolean pull = axial > 0;
+    drawing.add(new Mark.Arrow(tag, new Point(x, top), new Point(x, top - 9), !pull, pull));
+    drawing.add(new Mark.Arrow(tag, new Point(x, bottom), new Point(x, bottom + 9), !pull, pull));
+    drawing.text(
+        tag,
+        x + 2,
+        top - 5,
+        Quantities.text(Dimension.FORCE, sketch.units(), Math.abs(axial)),
+        Mark.Anchor.START,
+        3.3,
+        Mark.Weight.BOLD);
   }
 
   /** The sheet of this size on which the whole joint and its call-outs fit. */
   public static Sheet fitted(Sketch sketch, double width, double height) {
-    throw new UnsupportedOperationException("comes with the figure commit");
+    StackLayout layout = StackLayout.of(sketch.joint(), Assessment.of(sketch.joint()));
+    double across = Math.max(20, width - LEFT_COLUMN - Dimensions.COLUMN);
+    double down = Math.max(20, height - TOP_MARGIN - BOTTOM_MARGIN);
+    double tall = layout.bottom() - layout.top();
+    double scale = Math.min(LARGEST_SCALE, Math.min(across / (2 * layout.reach()), down / tall));
+    double headY = TOP_MARGIN + (down - tall * scale) / 2 - layout.top() * scale;
+    return new Sheet(width, height, scale, LEFT_COLUMN + across / 2, headY);
   }
 }

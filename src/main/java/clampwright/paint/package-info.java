@@ -1,0 +1,2 @@
+/** Gives the roles of a figure their look. Knows no screen. */
+package clampwright.paint;
