@@ -10,7 +10,7 @@ import javafx.scene.text.FontWeight;
 /** The one typeface of screen and print, Liberation Sans, from the program's own libraries. */
 public final class Fonts {
   private static final String FAMILY = "Liberation Sans";
-  private static final String FOLDER = "/org/openpdf/fonts/liberation/";
+  private static final String FOLDER = "/liberation/";
 
   static {
     load("LiberationSans-Regular.ttf");
