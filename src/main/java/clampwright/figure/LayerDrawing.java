@@ -43,7 +43,7 @@ final class LayerDrawing {
       double hole = side * layout.holeRadius(i);
       List<Point> edge = edge(i, side);
       Feature feature = side < 0 ? Feature.LEFT_EDGE : Feature.RIGHT_EDGE;
-      boolean wide = outline(i) instanceof Outline.Wide;
+      boolean wide = !layout.isDrawn(reach(i, side));
       drawing.path(Tag.of(wide ? Role.FINE_LINE : Role.OUTLINE, part, feature), edge);
       Point top = drawing.at(hole, layout.from(i));
       Point bottom = drawing.at(hole, layout.to(i));
@@ -61,6 +61,11 @@ final class LayerDrawing {
     return layout.joint().elements().get(i).outline();
   }
 
+  /** Distance of an outer edge from the axis; infinite for a wide part. */
+  private double reach(int i, int side) {
+    return side < 0 ? outline(i).leftReach() : outline(i).rightReach();
+  }
+
   /** Polygon of one half, −1 left, 1 right. */
   List<Point> half(int i, int side) {
     double hole = side * layout.holeRadius(i);
@@ -72,8 +77,8 @@ final class LayerDrawing {
 
   /** The outer edge from top to bottom; a wavy break line for a wide part. */
   private List<Point> edge(int i, int side) {
-    double reach = side < 0 ? outline(i).leftReach() : outline(i).rightReach();
-    if (!Double.isInfinite(reach)) {
+    double reach = reach(i, side);
+    if (layout.isDrawn(reach)) {
       return List.of(
           drawing.at(side * reach, layout.from(i)), drawing.at(side * reach, layout.to(i)));
     }

@@ -17,6 +17,9 @@ import clampwright.mechanics.Zone;
  */
 record StackLayout(Joint joint, double[] from, double reach, double length, double shankLength) {
 
+  /** How much farther than the zone asks for an edge may lie and still be drawn in place. */
+  private static final double FARTHEST = 1.5;
+
   static StackLayout of(Joint joint, Assessment assessment) {
     double[] from = new double[joint.elements().size() + 1];
     for (int i = 0; i < joint.elements().size(); i++) {
@@ -39,20 +42,32 @@ record StackLayout(Joint joint, double[] from, double reach, double length, doub
         : joint.fastener().thread().diameter();
   }
 
+  /**
+   * As far as the zone asks for, with some room; parts that reach much farther are broken off, so
+   * that one distant edge does not make the rest small.
+   */
   private static double reach(Joint joint, Assessment assessment) {
-    double reach = 1.9 * joint.fastener().head().rim() / 2;
+    double needed = 1.9 * joint.fastener().head().rim() / 2;
     if (assessment instanceof Assessment.Solved solved) {
       for (Zone.Piece piece : solved.zone().pieces()) {
-        reach = Math.max(reach, 1.25 * Math.max(piece.fromRadius(), piece.toRadius()));
+        needed = Math.max(needed, 1.25 * Math.max(piece.fromRadius(), piece.toRadius()));
       }
     }
+    double reach = needed;
     for (Element element : joint.elements()) {
-      double left = element.outline().leftReach();
-      double right = element.outline().rightReach();
-      reach = Math.max(reach, Double.isInfinite(left) ? 0 : left);
-      reach = Math.max(reach, Double.isInfinite(right) ? 0 : right);
+      for (double edge :
+          new double[] {element.outline().leftReach(), element.outline().rightReach()}) {
+        if (edge <= FARTHEST * needed) {
+          reach = Math.max(reach, edge);
+        }
+      }
     }
     return reach;
+  }
+
+  /** Whether an edge so far from the axis is drawn where it is; else the part is broken off. */
+  boolean isDrawn(double edge) {
+    return edge <= reach;
   }
 
   double to(int i) {

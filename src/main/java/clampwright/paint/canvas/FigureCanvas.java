@@ -2,6 +2,10 @@ package clampwright.paint.canvas;
 
 import clampwright.figure.Figure;
 import clampwright.paint.Palette;
+import javafx.beans.InvalidationListener;
+import javafx.beans.WeakInvalidationListener;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.SimpleObjectProperty;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.layout.Region;
 import javafx.stage.Window;
@@ -15,10 +19,13 @@ public final class FigureCanvas extends Region {
   public static final double PIXELS_PER_MM = 96 / 25.4;
 
   private final Canvas canvas = new Canvas();
+  private final InvalidationListener look = palette -> requestLayout();
+  // The palette outlives every canvas and must not keep one alive.
+  private final WeakInvalidationListener repaint = new WeakInvalidationListener(look);
   private Figure figure;
-  private Palette palette = Palette.LIGHT;
+  private static final ObjectProperty<Palette> PALETTE = new SimpleObjectProperty<>(Palette.LIGHT);
 
-  /** An empty canvas in the light palette. */
+  /** An empty canvas. */
   public FigureCanvas() {
     getChildren().add(canvas);
     canvas.setMouseTransparent(true);
@@ -26,6 +33,7 @@ public final class FigureCanvas extends Region {
         .flatMap(scene -> scene.windowProperty())
         .flatMap(Window::outputScaleXProperty)
         .addListener(scale -> requestLayout());
+    PALETTE.addListener(repaint);
   }
 
   /** Shows another figure from the next pulse on; the same figure again costs nothing. */
@@ -36,12 +44,9 @@ public final class FigureCanvas extends Region {
     }
   }
 
-  /** Shows the figure in another palette. */
-  public void setPalette(Palette palette) {
-    if (palette != this.palette) {
-      this.palette = palette;
-      requestLayout();
-    }
+  /** The palette of every canvas in the program. */
+  public static ObjectProperty<Palette> paletteProperty() {
+    return PALETTE;
   }
 
   @Override
@@ -55,6 +60,7 @@ public final class FigureCanvas extends Region {
         getScene() == null || getScene().getWindow() == null
             ? 1
             : getScene().getWindow().getOutputScaleX();
-    new CanvasPainter(canvas.getGraphicsContext2D(), palette, PIXELS_PER_MM, scale).paint(figure);
+    new CanvasPainter(canvas.getGraphicsContext2D(), PALETTE.get(), PIXELS_PER_MM, scale)
+        .paint(figure);
   }
 }

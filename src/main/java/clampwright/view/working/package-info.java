@@ -1,0 +1,2 @@
+/** The arithmetic of whatever is selected. */
+package clampwright.view.working;
