@@ -44,13 +44,16 @@ final class ConeDrawing {
   private void fill(int i, Role role, double from, double fromRadius, double to, double toRadius) {
     double hole = layout.holeRadius(i);
     double limit = Math.min(layout.reach(), outer(i));
-    drawing.area(
-        Tag.of(role, Part.element(i), Feature.BODY),
-        List.of(
-            drawing.at(-Math.min(fromRadius, limit), from),
-            drawing.at(-hole, from),
-            drawing.at(-hole, to),
-            drawing.at(-Math.min(toRadius, limit), to)));
+    List<Point> points = new ArrayList<>();
+    points.add(drawing.at(-Math.min(fromRadius, limit), from));
+    if (fromRadius > limit != toRadius > limit) {
+      double z = from + (to - from) * (limit - fromRadius) / (toRadius - fromRadius);
+      points.add(drawing.at(-limit, z));
+    }
+    points.add(drawing.at(-Math.min(toRadius, limit), to));
+    points.add(drawing.at(-hole, to));
+    points.add(drawing.at(-hole, from));
+    drawing.area(Tag.of(role, Part.element(i), Feature.BODY), points);
   }
 
   /** What of the left half there is to fill: a strip ends at its left edge. */
