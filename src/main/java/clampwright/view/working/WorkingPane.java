@@ -7,26 +7,32 @@ import clampwright.figure.working.Working;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.view.OncePerPulse;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
-import javafx.scene.control.Label;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
+import javafx.scene.text.Text;
+import javafx.scene.text.TextFlow;
 
 /** The working of the selected part, or of a readout that was pressed: formula, numbers, source. */
 public final class WorkingPane extends ScrollPane {
+  private static final Pattern LOW = Pattern.compile("_([A-Za-z0-9]+)");
+
   private final SketchModel model;
-  private final Label title = new Label();
+  private final TextFlow title = new TextFlow();
   private final GridPane grid = new GridPane();
-  private Optional<Headline> headline = Optional.of(Headline.MEMBERS);
+  private Optional<Headline> headline = Optional.empty();
   private Part shown;
 
   /** A pane that follows the model. */
   public WorkingPane(SketchModel model) {
     this.model = model;
     getStyleClass().add("working");
-    title.getStyleClass().add("working-title");
     grid.getStyleClass().add("working-grid");
     grid.setHgap(18);
     grid.setVgap(5);
@@ -67,7 +73,8 @@ public final class WorkingPane extends ScrollPane {
             .map(wanted -> Working.of(wanted, sketch.joint(), model.assessment(), sketch.units()))
             .orElseGet(
                 () -> Working.of(selected, sketch.joint(), model.assessment(), sketch.units()));
-    title.setText(working.title());
+    title.getChildren().setAll(texts(working.title(), "working-title"));
+    title.setAccessibleText(working.title());
     grid.getChildren().clear();
     int row = 0;
     for (Step step : working.steps()) {
@@ -87,10 +94,32 @@ public final class WorkingPane extends ScrollPane {
     grid.add(cell(step.source(), "working-source"), 4, row);
   }
 
-  private static Label cell(String text, String style) {
-    Label label = new Label(text.replaceAll("_([A-Za-z0-9]+)", "$1"));
-    label.setWrapText(true);
-    label.getStyleClass().add(style);
-    return label;
+  private static TextFlow cell(String text, String style) {
+    TextFlow cell = new TextFlow();
+    cell.getChildren().setAll(texts(text, style));
+    return cell;
+  }
+
+  /** The text with what follows an underscore set low, as in k_m. */
+  private static List<Text> texts(String text, String style) {
+    List<Text> texts = new ArrayList<>();
+    Matcher low = LOW.matcher(text);
+    int end = 0;
+    while (low.find()) {
+      texts.add(text(text.substring(end, low.start()), style));
+      Text index = text(low.group(1), style);
+      index.getStyleClass().add("working-index");
+      index.setTranslateY(3);
+      texts.add(index);
+      end = low.end();
+    }
+    texts.add(text(text.substring(end), style));
+    return texts;
+  }
+
+  private static Text text(String text, String style) {
+    Text node = new Text(text);
+    node.getStyleClass().addAll("working-text", style);
+    return node;
   }
 }
