@@ -133,6 +133,7 @@ final class WindowCommands {
             "Shortcut+T"),
         line(),
         Command.of("schedule", "Schedule", () -> window.drawer().show("Schedule"), "Shortcut+1"),
+        Command.of("working", "Working", () -> window.drawer().show("Working"), "Shortcut+2"),
         Command.when(
             "drawer",
             () -> window.drawer().openProperty().get() ? "Close the drawer" : "Open the drawer",
