@@ -2,9 +2,12 @@ package clampwright.app;
 
 import clampwright.edit.SketchModel;
 import clampwright.figure.working.Headline;
+import clampwright.paint.Palette;
+import clampwright.paint.canvas.FigureCanvas;
 import clampwright.view.found.FoundPane;
 import clampwright.view.given.GivenPane;
 import clampwright.view.schedule.SchedulePane;
+import clampwright.view.section.SectionPane;
 import clampwright.view.working.WorkingPane;
 import java.util.function.Supplier;
 import javafx.beans.property.StringProperty;
@@ -24,6 +27,7 @@ final class WindowLayout {
   private final SketchModel model;
   private final Settings settings;
   private final Later later = new Later();
+  private final SectionPane section;
   private final BorderPane root = new BorderPane();
   private Drawer drawer;
   private WorkingPane working;
@@ -46,7 +50,13 @@ final class WindowLayout {
               tools.showLook(settings.values().dark);
               return tools;
             });
-    BorderPane panes = new BorderPane(new Region());
+    showPalette();
+    section = new SectionPane(model);
+    StackPane sheet = new StackPane(section);
+    sheet.getStyleClass().add("sheet-edge");
+    StackPane desk = new StackPane(sheet);
+    desk.getStyleClass().add("section-place");
+    BorderPane panes = new BorderPane(desk);
     panes.setRight(later.place("found-place", () -> new FoundPane(model, this::openWorking)));
     panes.setLeft(later.place("given-place", () -> new GivenPane(model)));
     root.setCenter(panes);
@@ -73,6 +83,14 @@ final class WindowLayout {
     place.setPrefHeight(values.drawerOpen ? values.drawerHeight : 0);
     later.add(() -> place.setPrefHeight(Region.USE_COMPUTED_SIZE));
     return place;
+  }
+
+  private void showPalette() {
+    FigureCanvas.paletteProperty().set(settings.values().dark ? Palette.DARK : Palette.LIGHT);
+  }
+
+  SectionPane section() {
+    return section;
   }
 
   private void openWorking(Headline headline) {
@@ -103,5 +121,6 @@ final class WindowLayout {
   void showLook(boolean dark) {
     later.finish();
     tools.showLook(dark);
+    showPalette();
   }
 }
