@@ -1,29 +1,19 @@
 package clampwright.app;
 
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
+import clampwright.paint.canvas.Fonts;
 import javafx.application.Application;
 import javafx.scene.Scene;
-import javafx.scene.text.Font;
 
 /** The two looks of the program, and its font. */
 final class Looks {
   private static final String THEMES = "/atlantafx/base/theme/";
   private static final String STYLES = "/clampwright/styles/";
-  private static final String FONTS = "/liberation/LiberationSans-";
 
   private Looks() {}
 
-  /** Loads the font that screen and print share. */
+  /** Loads the typeface that screen and print share. */
   static void loadFonts() {
-    for (String face : new String[] {"Regular", "Bold"}) {
-      try (InputStream in = Looks.class.getResourceAsStream(FONTS + face + ".ttf")) {
-        Font.loadFont(in, 12);
-      } catch (IOException e) {
-        throw new UncheckedIOException(e);
-      }
-    }
+    Fonts.family();
   }
 
   /** The theme that controls start from; costs time, and only controls need it. */

@@ -2,6 +2,7 @@ package clampwright.app;
 
 import clampwright.edit.SketchModel;
 import clampwright.view.field.Typed;
+import clampwright.view.section.SectionPane;
 import java.io.File;
 import java.nio.file.Path;
 import java.util.Optional;
@@ -45,6 +46,8 @@ final class MainWindow implements Documents.Desk {
     scene.addEventHandler(DragEvent.DRAG_DROPPED, this::dropped);
     Looks.showFirst(scene, values.dark);
     showOn(stage, values);
+    layout.section().hintProperty().subscribe(hint::set);
+    layout.section().requestFocus();
     layout.start(scene);
   }
 
@@ -74,6 +77,10 @@ final class MainWindow implements Documents.Desk {
   /** Whether all parts of the window are there. */
   boolean isComplete() {
     return layout.isComplete();
+  }
+
+  SectionPane section() {
+    return layout.section();
   }
 
   Stage stage() {

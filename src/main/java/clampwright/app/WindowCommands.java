@@ -7,6 +7,8 @@ import clampwright.edit.SketchModel;
 
 /** Puts together what the window can do, menu by menu, with texts and keys. */
 final class WindowCommands {
+  private static final double ZOOM = 1.25;
+
   private final MainWindow window;
   private final SketchModel model;
   private final Documents documents;
@@ -113,6 +115,21 @@ final class WindowCommands {
   private void addView() {
     commands.add(
         "View",
+        Command.of(
+            "zoom-in",
+            "Zoom in",
+            () -> window.section().zoom(ZOOM),
+            "Shortcut+PLUS",
+            "Shortcut+EQUALS",
+            "Shortcut+ADD"),
+        Command.of(
+            "zoom-out",
+            "Zoom out",
+            () -> window.section().zoom(1 / ZOOM),
+            "Shortcut+MINUS",
+            "Shortcut+SUBTRACT"),
+        Command.of("fit", "Fit", () -> window.section().fit(), "Shortcut+0", "F"),
+        line(),
         Command.when(
             "units",
             () ->
@@ -133,6 +150,7 @@ final class WindowCommands {
             "Shortcut+T"),
         line(),
         Command.of("schedule", "Schedule", () -> window.drawer().show("Schedule"), "Shortcut+1"),
+        Command.of("working", "Working", () -> window.drawer().show("Working"), "Shortcut+2"),
         Command.when(
             "drawer",
             () -> window.drawer().openProperty().get() ? "Close the drawer" : "Open the drawer",

@@ -27,19 +27,16 @@ final class WindowLayout {
   private final SketchModel model;
   private final Settings settings;
   private final Later later = new Later();
-  private final BorderPane root = new BorderPane();
   private final SectionPane section;
-  private WorkingPane working;
+  private final BorderPane root = new BorderPane();
   private Drawer drawer;
+  private WorkingPane working;
   private ToolRow tools;
 
   WindowLayout(
       SketchModel model, Settings settings, Supplier<ToolRow> toolRow, StringProperty hint) {
     this.model = model;
     this.settings = settings;
-    FigureCanvas.paletteProperty().set(palette(settings.values().dark));
-    section = new SectionPane(model);
-    section.hintProperty().addListener((observable, was, is) -> hint.set(is));
     later.add(
         () -> {
           Looks.showTheme(settings.values().dark);
@@ -53,38 +50,19 @@ final class WindowLayout {
               tools.showLook(settings.values().dark);
               return tools;
             });
-    BorderPane panes = new BorderPane(section);
-    panes.setRight(
-        later.place(
-            "found-place",
-            () -> new FoundPane(model, finding -> open(Headline.valueOf(finding.name())))));
+    showPalette();
+    section = new SectionPane(model);
+    StackPane sheet = new StackPane(section);
+    sheet.getStyleClass().add("sheet-edge");
+    StackPane desk = new StackPane(sheet);
+    desk.getStyleClass().add("section-place");
+    BorderPane panes = new BorderPane(desk);
+    panes.setRight(later.place("found-place", () -> new FoundPane(model, this::openWorking)));
     panes.setLeft(later.place("given-place", () -> new GivenPane(model)));
     root.setCenter(panes);
     root.setTop(top);
     root.setBottom(
         new VBox(drawerPlace(), later.place("status-place", () -> new StatusLine(hint))));
-  }
-
-  private static Palette palette(boolean dark) {
-    return dark ? Palette.DARK : Palette.LIGHT;
-  }
-
-  private WorkingPane working() {
-    if (working == null) {
-      working = new WorkingPane(model);
-    }
-    return working;
-  }
-
-  /** Opens the working of a readout. */
-  private void open(Headline headline) {
-    drawer().show("Working");
-    working().show(headline);
-  }
-
-  /** The drawing. */
-  SectionPane section() {
-    return section;
   }
 
   private StackPane drawerPlace() {
@@ -93,9 +71,10 @@ final class WindowLayout {
         later.place(
             "drawer-place",
             () -> {
+              working = new WorkingPane(model);
               drawer = new Drawer(values.drawerHeight);
               drawer.add("Schedule", () -> new SchedulePane(model));
-              drawer.add("Working", this::working);
+              drawer.add("Working", () -> working);
               drawer.show("Schedule");
               drawer.openProperty().set(values.drawerOpen);
               return drawer;
@@ -104,6 +83,19 @@ final class WindowLayout {
     place.setPrefHeight(values.drawerOpen ? values.drawerHeight : 0);
     later.add(() -> place.setPrefHeight(Region.USE_COMPUTED_SIZE));
     return place;
+  }
+
+  private void showPalette() {
+    FigureCanvas.paletteProperty().set(settings.values().dark ? Palette.DARK : Palette.LIGHT);
+  }
+
+  SectionPane section() {
+    return section;
+  }
+
+  private void openWorking(Headline headline) {
+    drawer().show("Working");
+    working.show(headline);
   }
 
   Parent root() {
@@ -128,7 +120,7 @@ final class WindowLayout {
 
   void showLook(boolean dark) {
     later.finish();
-    FigureCanvas.paletteProperty().set(palette(dark));
     tools.showLook(dark);
+    showPalette();
   }
 }

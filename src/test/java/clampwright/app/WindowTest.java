@@ -11,8 +11,10 @@ import clampwright.joint.Sketch;
 import clampwright.quantity.UnitSystem;
 import clampwright.store.SketchFile;
 import clampwright.store.Stored;
+import clampwright.view.MathText;
 import clampwright.view.Sketches;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
@@ -332,6 +334,39 @@ class WindowTest {
     assertTrue(
         robot.lookup(".keys .label").queryAll().stream()
             .anyMatch(node -> ((Labeled) node).getText().contains("Ctrl+Shift+S")));
+  }
+
+  @Test
+  void aReadoutOpensItsWorkingUntilAPartIsSelected() {
+    String effective = text("#schedule-2 .effective");
+    robot.clickOn("#found-parting-load");
+    assertEquals("Parting load", title());
+    assertTrue(results().contains("= " + text("#found-parting-load-value") + " kN"));
+
+    robot.interact(() -> model.select(Part.element(1)));
+    WaitForAsyncUtils.waitForFxEvents();
+    assertTrue(title().startsWith("Cover"), title());
+    assertTrue(results().contains("= " + effective + " mm"));
+  }
+
+  @Test
+  void theWorkingFollowsTheSketchAlsoAfterItWasHidden() {
+    press(KeyCode.SHORTCUT, KeyCode.DIGIT2);
+    press(KeyCode.SHORTCUT, KeyCode.DIGIT1);
+    enter("#preload", "30");
+    robot.clickOn("#found-parting-load");
+
+    assertTrue(results().contains("= " + text("#found-parting-load-value") + " kN"));
+  }
+
+  private String title() {
+    return robot.lookup("#working-title").queryAs(MathText.class).text();
+  }
+
+  private List<String> results() {
+    return robot.lookup(".step-result").queryAllAs(MathText.class).stream()
+        .map(MathText::text)
+        .toList();
   }
 
   @Test

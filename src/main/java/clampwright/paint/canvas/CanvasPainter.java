@@ -32,9 +32,12 @@ final class CanvasPainter {
     this.outputScale = outputScale;
   }
 
-  void paint(Figure figure) {
+  void paintPaper(Figure figure) {
     context.setFill(colour(palette.paper()));
     context.fillRect(0, 0, figure.width() * perMm, figure.height() * perMm);
+  }
+
+  void paint(Figure figure) {
     context.setTextBaseline(VPos.BASELINE);
     for (Mark mark : figure.marks()) {
       paint(mark, palette.of(mark.role()));

@@ -23,6 +23,7 @@ public final class FigureCanvas extends Region {
   // The palette outlives every canvas and must not keep one alive.
   private final WeakInvalidationListener repaint = new WeakInvalidationListener(look);
   private Figure figure;
+  private boolean onPaper = true;
   private static final ObjectProperty<Palette> PALETTE = new SimpleObjectProperty<>(Palette.LIGHT);
 
   /** An empty canvas. */
@@ -49,6 +50,12 @@ public final class FigureCanvas extends Region {
     return PALETTE;
   }
 
+  /** Whether the figure lies on the palette's paper; else on whatever is behind the canvas. */
+  public void setOnPaper(boolean onPaper) {
+    this.onPaper = onPaper;
+    requestLayout();
+  }
+
   @Override
   protected void layoutChildren() {
     canvas.setWidth(Math.ceil(getWidth()));
@@ -60,7 +67,12 @@ public final class FigureCanvas extends Region {
         getScene() == null || getScene().getWindow() == null
             ? 1
             : getScene().getWindow().getOutputScaleX();
-    new CanvasPainter(canvas.getGraphicsContext2D(), PALETTE.get(), PIXELS_PER_MM, scale)
-        .paint(figure);
+    CanvasPainter painter =
+        new CanvasPainter(canvas.getGraphicsContext2D(), PALETTE.get(), PIXELS_PER_MM, scale);
+    canvas.getGraphicsContext2D().clearRect(0, 0, canvas.getWidth(), canvas.getHeight());
+    if (onPaper) {
+      painter.paintPaper(figure);
+    }
+    painter.paint(figure);
   }
 }

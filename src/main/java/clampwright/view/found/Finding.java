@@ -1,11 +1,12 @@
 package clampwright.view.found;
 
+import clampwright.figure.working.Headline;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.quantity.Dimension;
 import java.util.function.ToDoubleFunction;
 
 /** The numbers that a joint comes to. */
-public enum Finding {
+enum Finding {
   MEMBERS(
       "Members  k",
       "m",
@@ -55,12 +56,17 @@ public enum Finding {
   }
 
   /** Its name in words. */
-  public String title() {
+  String title() {
     return title;
   }
 
   Dimension dimension() {
     return dimension;
+  }
+
+  /** What its working is filed under. */
+  Headline headline() {
+    return Headline.valueOf(name());
   }
 
   double of(Solved solved) {

@@ -2,6 +2,7 @@ package clampwright.view.found;
 
 import clampwright.edit.SketchModel;
 import clampwright.figure.Sentences;
+import clampwright.figure.working.Headline;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.Assessment;
@@ -37,7 +38,7 @@ public final class FoundPane extends ScrollPane {
    *
    * @param openWorking what pressing a readout does
    */
-  public FoundPane(SketchModel model, Consumer<Finding> openWorking) {
+  public FoundPane(SketchModel model, Consumer<Headline> openWorking) {
     this.model = model;
     getStyleClass().add("found");
     notices = new Remarks(this::nameOf, model.selectionProperty()::set);
@@ -46,7 +47,7 @@ public final class FoundPane extends ScrollPane {
     reasons.setId("reasons");
     for (Finding finding : Finding.values()) {
       Readout readout = new Readout(finding);
-      readout.setOnAction(event -> openWorking.accept(finding));
+      readout.setOnAction(event -> openWorking.accept(finding.headline()));
       readouts.put(finding, readout);
     }
     solvedSheet

@@ -106,6 +106,11 @@ public final class SectionPane extends Region {
     hint.set(sentence);
   }
 
+  /** Zooms about the middle of the sheet; above 1 enlarges. */
+  public void zoom(double factor) {
+    viewport.zoom(factor, getWidth() / 2, getHeight() / 2);
+  }
+
   /** Brings the whole joint into sight, and keeps it there from now on. */
   public void fit() {
     viewport.fit(model.sketch());

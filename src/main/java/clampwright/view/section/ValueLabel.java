@@ -9,20 +9,25 @@ final class ValueLabel extends VBox {
   private static final PseudoClass TYPED = PseudoClass.getPseudoClass("typed");
   private static final double OFF_POINTER = 16;
 
-  private final Label value = new Label();
-  private final Label problem = new Label();
+  private Label value;
+  private Label problem;
 
   ValueLabel() {
     getStyleClass().add("drag-value");
-    value.getStyleClass().add("value");
-    value.setId("drag-value");
-    problem.getStyleClass().add("problem");
-    problem.setId("drag-problem");
-    getChildren().addAll(value, problem);
     setManaged(false);
     setMouseTransparent(true);
     setVisible(false);
-    tell("");
+  }
+
+  /** Labels need the theme; the window's first frame, which has none, does without them. */
+  private void make() {
+    value = new Label();
+    value.getStyleClass().add("value");
+    value.setId("drag-value");
+    problem = new Label();
+    problem.getStyleClass().add("problem");
+    problem.setId("drag-problem");
+    getChildren().addAll(value, problem);
   }
 
   void show(String caption, Pointer at) {
@@ -38,6 +43,9 @@ final class ValueLabel extends VBox {
   }
 
   private void place(String text, String sentence, Pointer at, boolean typed) {
+    if (value == null) {
+      make();
+    }
     value.setText(text);
     tell(sentence);
     pseudoClassStateChanged(TYPED, typed);

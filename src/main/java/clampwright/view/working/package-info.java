@@ -1,2 +1,2 @@
-/** The arithmetic of whatever is selected. */
+/** The working: the arithmetic of the selected part or of a readout. */
 package clampwright.view.working;
