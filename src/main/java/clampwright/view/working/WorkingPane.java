@@ -15,16 +15,12 @@ import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.VBox;
-import javafx.scene.text.Text;
-import javafx.scene.text.TextFlow;
 
 /**
  * The arithmetic of the selected part, or of a readout until another part is selected: formula,
  * numbers put in, result, source.
  */
 public final class WorkingPane extends ScrollPane {
-  private static final Pattern LOW = Pattern.compile("_([A-Za-z0-9]+)");
-
   private final SketchModel model;
   private final ObjectProperty<Optional<Headline>> headline =
       new SimpleObjectProperty<>(this, "headline", Optional.empty());

@@ -139,8 +139,7 @@ class SectionPaneTest {
   @Test
   void theWheelZoomsAndTheFitKeyFits() {
     Sheet sheet = pane.viewport().sheet();
-    Sheet fitted =
-        SectionFigure.fitted(model.sketch(), sheet.width(), sheet.height());
+    Sheet fitted = SectionFigure.fitted(model.sketch(), sheet.width(), sheet.height());
     assertEquals(fitted.scale(), pane.viewport().sheet().scale(), 1e-9);
     robot.moveTo(at(10, 5)).scroll(3, javafx.geometry.VerticalDirection.UP);
     assertNotEquals(fitted.scale(), pane.viewport().sheet().scale());
