@@ -12,9 +12,11 @@ public final class Benches {
     String name = arguments.length == 0 ? "" : arguments[0];
     switch (name) {
       case "assessment" -> org.openjdk.jmh.Main.main(new String[] {"AssessmentBench"});
+      case "frame" -> FrameBench.run();
+      case "startup" -> StartupBench.run();
       default ->
           throw new IllegalArgumentException(
-              "no benchmark is called '" + name + "'; there is: assessment");
+              "no benchmark is called '" + name + "'; there are: assessment, frame, startup");
     }
   }
 }
