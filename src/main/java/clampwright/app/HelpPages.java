@@ -1,6 +1,7 @@
 package clampwright.app;
 
 import clampwright.figure.Sentences;
+import clampwright.view.section.SectionPane;
 import java.util.ArrayList;
 import java.util.List;
 import javafx.geometry.Insets;
@@ -71,24 +72,30 @@ final class HelpPages {
     grid.getStyleClass().add("keys");
     grid.setHgap(28);
     grid.setVgap(5);
-    int[] row = {0};
     commands
         .menus()
         .forEach(
             (menu, list) -> {
-              Label heading = heading(menu);
-              GridPane.setMargin(heading, new Insets(row[0] == 0 ? 0 : 10, 0, 2, 0));
-              grid.add(heading, 0, row[0]++, 2, 1);
-              for (Command command : list) {
-                if (!command.keys().isEmpty()) {
-                  grid.add(new Label(command.text().get()), 0, row[0]);
-                  grid.add(new Label(names(command.keys())), 1, row[0]++);
-                }
-              }
+              addHeading(grid, menu);
+              list.stream()
+                  .filter(command -> !command.keys().isEmpty())
+                  .forEach(command -> addKey(grid, command.text().get(), names(command.keys())));
             });
+    addHeading(grid, "On the drawing");
+    SectionPane.keys().forEach(key -> addKey(grid, key.does(), key.name()));
     VBox page = new VBox(grid);
     page.getStyleClass().add("help-page");
     return page;
+  }
+
+  private static void addHeading(GridPane grid, String text) {
+    Label heading = heading(text);
+    GridPane.setMargin(heading, new Insets(grid.getRowCount() == 0 ? 0 : 10, 0, 2, 0));
+    grid.add(heading, 0, grid.getRowCount(), 2, 1);
+  }
+
+  private static void addKey(GridPane grid, String what, String keys) {
+    grid.addRow(grid.getRowCount(), new Label(what), new Label(keys));
   }
 
   private static String names(List<KeyCombination> keys) {

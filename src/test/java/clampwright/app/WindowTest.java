@@ -331,6 +331,7 @@ class WindowTest {
     press(KeyCode.SHORTCUT, KeyCode.K);
 
     assertTrue(robot.lookup("Insert layer").tryQuery().isPresent());
+    assertTrue(robot.lookup("Suspend snapping").tryQuery().isPresent());
     assertTrue(
         robot.lookup(".keys .label").queryAll().stream()
             .anyMatch(node -> ((Labeled) node).getText().contains("Ctrl+Shift+S")));

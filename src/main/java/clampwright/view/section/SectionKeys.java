@@ -18,6 +18,19 @@ import javafx.scene.input.KeyEvent;
 
 /** What keys do while nothing is being dragged. */
 final class SectionKeys {
+  /** What the keys below and those of a drag do, for the keyboard page. */
+  static final List<SectionPane.Key> LIST =
+      List.of(
+          new SectionPane.Key("Up, Down", "Select the part above or below"),
+          new SectionPane.Key("Shift+Up, Shift+Down", "Thicken or thin the selected part"),
+          new SectionPane.Key("Digits", "Set the selected part's thickness, angle or thread"),
+          new SectionPane.Key("Enter", "Open the selected part's card"),
+          new SectionPane.Key("L", "Draw a layer"),
+          new SectionPane.Key("W", "Draw or place a washer"),
+          new SectionPane.Key("Alt in a drag", "Suspend snapping"),
+          new SectionPane.Key("Digits in a drag", "Set the value exactly"),
+          new SectionPane.Key("Esc", "Take a drag back, leave the tool, select nothing"));
+
   private static final double ZOOM = 1.25;
 
   private final SectionPane pane;

@@ -10,6 +10,7 @@ import clampwright.figure.Tag;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.paint.canvas.FigureCanvas;
+import java.util.List;
 import java.util.Optional;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyStringProperty;
@@ -29,6 +30,14 @@ import javafx.stage.Window;
  * <p>It paints once per pulse, however often the model changes until then.
  */
 public final class SectionPane extends Region {
+  /**
+   * A key of the drawing.
+   *
+   * @param name as it is called
+   * @param does what it does there
+   */
+  public record Key(String name, String does) {}
+
   /** How far from a line the pointer still means it [sheet mm]. */
   private static final double REACH = 1.4;
 
@@ -82,6 +91,11 @@ public final class SectionPane extends Region {
     model.openedProperty().when(shown).subscribe((Sketch sketch) -> viewport.beginAnew());
     viewport.sheetProperty().subscribe((Sheet sheet) -> redraw());
     tool.subscribe((Tool taken) -> redraw());
+  }
+
+  /** The keys that mean something while the drawing has the focus, besides those of the menus. */
+  public static List<Key> keys() {
+    return SectionKeys.LIST;
   }
 
   /** The tool in the hand; it is laid down after each use. */
