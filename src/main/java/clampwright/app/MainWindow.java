@@ -6,6 +6,7 @@ import clampwright.view.section.SectionPane;
 import java.io.File;
 import java.nio.file.Path;
 import java.util.Optional;
+import java.util.stream.Stream;
 import javafx.application.Platform;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
@@ -19,6 +20,9 @@ import javafx.stage.Stage;
 
 /** The window of the editor: what it does when asked by menu, key, mouse or system. */
 final class MainWindow implements Documents.Desk {
+  private static final String UNTAKEN =
+      "A field still holds text that could not be taken over; it is marked.";
+
   private final Stage stage;
   private final SketchModel model;
   private final Settings settings;
@@ -157,21 +161,21 @@ final class MainWindow implements Documents.Desk {
 
   @Override
   public void clear() {
-    clear(scene.getRoot());
+    typed(scene.getRoot()).toList().forEach(Typed::restore);
   }
 
-  private static void clear(Node node) {
-    if (node instanceof Typed typed) {
-      typed.restore();
-    }
-    if (node instanceof Parent parent) {
-      parent.getChildrenUnmodifiable().forEach(MainWindow::clear);
-    }
+  /** Every field at or in a node. */
+  private static Stream<Typed> typed(Node node) {
+    Stream<Typed> here = node instanceof Typed typed ? Stream.of(typed) : Stream.empty();
+    return node instanceof Parent parent
+        ? Stream.concat(here, parent.getChildrenUnmodifiable().stream().flatMap(MainWindow::typed))
+        : here;
   }
 
   @Override
   public void report(String sentence) {
-    hint.set(sentence);
+    boolean untaken = typed(scene.getRoot()).anyMatch(Typed::isWrong);
+    hint.set(untaken ? sentence + " " + UNTAKEN : sentence);
   }
 
   private void draggedOver(DragEvent event) {

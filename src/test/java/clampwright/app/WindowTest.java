@@ -210,7 +210,7 @@ class WindowTest {
   void theScheduleAndTheSelectionAreOne() {
     robot.clickOn("#schedule-4 .part");
     assertEquals(Part.element(3), model.selection());
-    assertEquals("Layer 4", text("#part-section .section-heading"));
+    assertEquals("Layer, no. 4", text("#part-section .section-heading"));
 
     robot.interact(() -> model.select(Part.element(2)));
     assertTrue(
@@ -283,6 +283,18 @@ class WindowTest {
     Stored.Opened stored = (Stored.Opened) SketchFile.read(file);
     assertEquals(31_500, stored.sketch().joint().preload().force());
     assertFalse(model.unsavedProperty().get());
+  }
+
+  @Test
+  void savingSaysWhatCouldNotBeTakenOver() {
+    answers.save = Optional.of(folder.resolve("untaken.joint.json"));
+    enter("#preload", "abc");
+
+    press(KeyCode.SHORTCUT, KeyCode.S);
+
+    assertTrue(text("#hint").startsWith("Saved as untaken.joint.json."), text("#hint"));
+    assertTrue(text("#hint").contains("could not be taken over"), text("#hint"));
+    assertEquals("abc", ((TextField) robot.lookup("#preload").query()).getText());
   }
 
   @Test

@@ -53,7 +53,8 @@ final class FastenerSection extends Section {
     FieldRow shank = add("Shank Ø", shankDiameter);
     FieldRow bore = add("Bore Ø", Fields.quantity(model, "bore", bore()));
     FieldRow material = add("Material", Fields.choice(model, "bolt-material", material()));
-    fold("faces, bore, material", headFace, nutFace, shank, bore, material);
+    FieldRow modulus = add("Modulus E", Fields.quantity(model, "bolt-modulus", modulus()));
+    fold("faces, bore, material", headFace, nutFace, shank, bore, material, modulus);
     OncePerPulse.keep(
         this,
         () -> {
@@ -200,6 +201,16 @@ final class FastenerSection extends Section {
         Dimension.LENGTH,
         sketch -> fastener(sketch).bore(),
         (sketch, value) -> withFastener(sketch, bolt -> bolt.withBore(value)));
+  }
+
+  private static SketchNumber modulus() {
+    return SketchNumber.required(
+        "Bolt modulus",
+        Dimension.MODULUS,
+        sketch -> fastener(sketch).material().modulus(),
+        (sketch, value) ->
+            withFastener(
+                sketch, bolt -> bolt.withMaterial(OwnMaterial.of(bolt.material(), value))));
   }
 
   static SketchNumber headFace() {

@@ -65,6 +65,15 @@ public final class PartFields {
     return length("Thickness", Element::thickness, Element::withThickness);
   }
 
+  /** A typed modulus makes the material one of the sketch's own. */
+  QuantityField modulus() {
+    return number(
+        "Modulus",
+        Dimension.MODULUS,
+        element -> element.material().modulus(),
+        (element, value) -> element.withMaterial(OwnMaterial.of(element.material(), value)));
+  }
+
   public QuantityField hole() {
     return length("Hole diameter", Element::hole, Element::withHole);
   }
@@ -133,11 +142,19 @@ public final class PartFields {
 
   private QuantityField length(
       String name, ToDoubleFunction<Element> read, BiFunction<Element, Double, Element> write) {
+    return number(name, Dimension.LENGTH, read, write);
+  }
+
+  private QuantityField number(
+      String name,
+      Dimension dimension,
+      ToDoubleFunction<Element> read,
+      BiFunction<Element, Double, Element> write) {
     return new QuantityField(
         model,
         SketchNumber.sometimes(
             name,
-            Dimension.LENGTH,
+            dimension,
             sketch ->
                 element(sketch)
                     .map(element -> OptionalDouble.of(read.applyAsDouble(element)))

@@ -49,18 +49,20 @@ final class PartSection extends Section {
             fields.hole(),
             fields.diameter(),
             fields.leftEdge(),
-            fields.rightEdge());
+            fields.rightEdge(),
+            fields.modulus());
     name.setId(prefix + "-name");
     name.getStyleClass().add("wide-field");
     material.getStyleClass().add("wide-field");
     material.setId(prefix + "-material");
     outline.setId(prefix + "-outline");
-    List<String> ids = List.of("-thickness", "-hole", "-diameter", "-left", "-right");
+    List<String> ids = List.of("-thickness", "-hole", "-diameter", "-left", "-right", "-modulus");
     for (int i = 0; i < ids.size(); i++) {
       numbers.get(i).text().setId(prefix + ids.get(i));
     }
     add("Name", name);
     add("Material", material);
+    add("Modulus E", numbers.get(5));
     add("Thickness", numbers.get(0));
     hole = add("Hole Ø", numbers.get(1));
     add("Outline", outline);
@@ -95,7 +97,7 @@ final class PartSection extends Section {
     setShown(this, element.isPresent());
     if (element.isPresent()) {
       Part part = model.selectionProperty().get();
-      setTitle((element.get().isWasher() ? "Washer " : "Layer ") + (part.index() + 1));
+      setTitle((element.get().isWasher() ? "Washer, no. " : "Layer, no. ") + (part.index() + 1));
       OutlineKind kind = OutlineKind.of(element.get().outline());
       setShown(hole, !model.sketch().joint().isTappedLayer(part.index()));
       setShown(diameter, kind == OutlineKind.ROUND);

@@ -11,6 +11,8 @@ import clampwright.view.OncePerPulse;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import javafx.geometry.Bounds;
+import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.input.KeyEvent;
@@ -37,6 +39,9 @@ public final class SchedulePane extends BorderPane {
     scroll.setFitToWidth(true);
     scroll.getStyleClass().add("schedule-body");
     scroll.setFocusTraversable(false);
+    // The columns stand under their titles also when a scroll bar takes room beside them.
+    header.maxWidthProperty().bind(scroll.viewportBoundsProperty().map(Bounds::getWidth));
+    BorderPane.setAlignment(header, Pos.TOP_LEFT);
     setTop(header);
     setCenter(scroll);
     OncePerPulse.keep(this, this::follow, model.sketchProperty(), model.assessmentProperty());

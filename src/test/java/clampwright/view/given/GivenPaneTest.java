@@ -9,6 +9,7 @@ import clampwright.joint.Anchor;
 import clampwright.joint.AngleRule;
 import clampwright.joint.Fastener;
 import clampwright.joint.Head;
+import clampwright.joint.Material;
 import clampwright.joint.Outline;
 import clampwright.joint.Part;
 import clampwright.joint.WasherRule;
@@ -217,13 +218,13 @@ class GivenPaneTest {
     assertFalse(isShown("#part-section"));
 
     robot.interact(() -> model.select(Part.element(3)));
-    assertEquals("Layer 4", text("#part-section .section-heading"));
+    assertEquals("Layer, no. 4", text("#part-section .section-heading"));
     assertFalse(isShown("#part-diameter"));
     enter("#part-left", "24");
     assertEquals(new Outline.Strip(24, 60), model.sketch().joint().elements().get(3).outline());
 
     robot.interact(() -> model.select(Part.element(0)));
-    assertEquals("Washer 1", text("#part-section .section-heading"));
+    assertEquals("Washer, no. 1", text("#part-section .section-heading"));
     assertFalse(isShown("#part-left"));
     assertEquals("20", ((TextField) robot.lookup("#part-diameter").query()).getText());
   }
@@ -262,6 +263,23 @@ class GivenPaneTest {
     assertEquals("Lid", model.sketch().joint().elements().get(1).name());
     assertEquals("aluminium 6061", model.sketch().joint().elements().get(1).material().name());
     assertEquals(12, model.sketch().joint().elements().get(1).hole());
+  }
+
+  @Test
+  void aTypedModulusMakesAnOwnMaterial() {
+    robot.interact(() -> model.select(Part.element(1)));
+
+    enter("#part-modulus", "195");
+    enter("#part-modulus", "30 Mpsi");
+
+    Material own = model.sketch().joint().elements().get(1).material();
+    assertEquals("carbon steel (generic), own E", own.name());
+    // 1 psi = 4.4482216152605 N / (25.4 mm)²
+    assertEquals(30e6 * 4.4482216152605 / (25.4 * 25.4), own.modulus(), 1e-6);
+
+    robot.clickOn("#fold-faces-bore-material");
+    enter("#bolt-modulus", "193");
+    assertEquals(193_000, fastener().material().modulus());
   }
 
   @Test
