@@ -3,6 +3,7 @@ package clampwright.app;
 import clampwright.paint.canvas.Fonts;
 import javafx.application.Application;
 import javafx.scene.Scene;
+import javafx.scene.paint.Color;
 
 /** The two looks of the program, and its font. */
 final class Looks {
@@ -21,14 +22,19 @@ final class Looks {
     Application.setUserAgentStylesheet(resource(THEMES + "primer-" + name(dark) + ".bss"));
   }
 
-  /** The styles that the first frame needs. */
-  static void showFirst(Scene scene, boolean dark) {
-    scene.getStylesheets().setAll(style("first"), style(name(dark)));
+  /** Colour between the panes, for the first frame, which has no style sheet yet. */
+  static Color window(boolean dark) {
+    return Color.web(dark ? "#14171B" : "#F1EFE9");
+  }
+
+  /** Colour of the panes, for the first frame. */
+  static Color pane(boolean dark) {
+    return Color.web(dark ? "#1A1E23" : "#F7F5F0");
   }
 
   /** All styles of our own. */
   static void showStyles(Scene scene, boolean dark) {
-    scene.getStylesheets().setAll(style("first"), style("clampwright"), style(name(dark)));
+    scene.getStylesheets().setAll(style("clampwright"), style(name(dark)));
   }
 
   private static String style(String name) {

@@ -33,8 +33,8 @@ final class MainWindow implements Documents.Desk {
 
   /** A window with the system's dialogs. */
   static MainWindow on(Stage stage, SketchModel model, Settings settings) {
-    FilePrompt prompt = new SystemFilePrompt(stage, () -> settings.recent().stream().findFirst());
-    return new MainWindow(stage, model, settings, prompt, new Dialogs(stage));
+    SystemDialogs dialogs = new SystemDialogs(stage, settings);
+    return new MainWindow(stage, model, settings, dialogs, dialogs);
   }
 
   MainWindow(
@@ -44,21 +44,14 @@ final class MainWindow implements Documents.Desk {
     this.settings = settings;
     Settings.Values values = settings.values();
     documents = new Documents(model, prompt, questions, settings, this);
-    layout = new WindowLayout(model, settings, this::tools, hint);
+    layout = new WindowLayout(model, settings, () -> new WindowParts(this, model, settings), hint);
     scene = new Scene(layout.root(), values.width, values.height);
     scene.addEventHandler(DragEvent.DRAG_OVER, this::draggedOver);
     scene.addEventHandler(DragEvent.DRAG_DROPPED, this::dropped);
-    Looks.showFirst(scene, values.dark);
     showOn(stage, values);
     layout.section().hintProperty().subscribe(hint::set);
     layout.section().requestFocus();
     layout.start(scene);
-  }
-
-  private ToolRow tools() {
-    Commands commands = new WindowCommands(this, model, documents).commands();
-    commands.listen(scene);
-    return new ToolRow(model, new Menus(commands, documents, settings).bar(), this::switchLook);
   }
 
   private void showOn(Stage stage, Settings.Values values) {
@@ -124,11 +117,8 @@ final class MainWindow implements Documents.Desk {
   }
 
   void switchLook() {
-    boolean dark = !settings.values().dark;
-    settings.values().dark = dark;
-    layout.showLook(dark);
-    Looks.showTheme(dark);
-    Looks.showStyles(scene, dark);
+    settings.values().dark = !settings.values().dark;
+    layout.showLook();
   }
 
   boolean isDark() {

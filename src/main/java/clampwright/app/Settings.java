@@ -1,8 +1,6 @@
 package clampwright.app;
 
-import com.google.gson.Gson;
-import com.google.gson.GsonBuilder;
-import com.google.gson.JsonParseException;
+import java.io.File;
 import java.io.IOException;
 import java.io.Reader;
 import java.io.Writer;
@@ -12,17 +10,27 @@ import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
+import java.util.Properties;
 
 /**
- * What the program remembers between runs, in a small file of the user's configuration folder. An
- * unreadable file means the usual settings; a folder that cannot be written costs the memory only,
- * never the work.
+ * What the program remembers between runs, in a small file of the user's configuration folder. What
+ * cannot be read there means the usual settings; a folder that cannot be written costs the memory
+ * only, never the work.
  */
 final class Settings {
   private static final int MOST_RECENT = 8;
-  private static final Gson GSON = new GsonBuilder().setPrettyPrinting().create();
+  private static final double LEAST_SIZE = 100;
+  private static final double LARGEST_SIZE = 20_000;
+  private static final String DARK = "dark";
+  private static final String DRAWER_OPEN = "drawer.open";
+  private static final String DRAWER_HEIGHT = "drawer.height";
+  private static final String WIDTH = "window.width";
+  private static final String HEIGHT = "window.height";
+  private static final String MAXIMIZED = "window.maximized";
+  private static final String RECENT = "recent.";
 
-  /** As written in the file. */
+  /** What is remembered. */
   static final class Values {
     boolean dark;
     boolean drawerOpen = true;
@@ -43,7 +51,7 @@ final class Settings {
 
   /** The settings of this user. */
   static Settings ofUser() {
-    return of(folder().resolve("settings.json"));
+    return of(folder().resolve("settings.properties"));
   }
 
   static Settings of(Path file) {
@@ -51,15 +59,53 @@ final class Settings {
   }
 
   private static Values read(Path file) {
+    Properties properties = new Properties();
     if (Files.isRegularFile(file)) {
       try (Reader reader = Files.newBufferedReader(file)) {
-        Values values = GSON.fromJson(reader, Values.class);
-        return values == null || values.recent == null ? new Values() : values;
-      } catch (IOException | JsonParseException unreadable) {
-        return new Values();
+        properties.load(reader);
+      } catch (IOException | IllegalArgumentException unreadable) {
+        properties.clear();
       }
     }
-    return new Values();
+    return values(properties);
+  }
+
+  /** The values written; the usual ones for what is missing or makes no sense. */
+  private static Values values(Properties properties) {
+    Values values = new Values();
+    values.dark = Boolean.parseBoolean(properties.getProperty(DARK));
+    values.drawerOpen = !"false".equals(properties.getProperty(DRAWER_OPEN));
+    values.drawerHeight = size(properties, DRAWER_HEIGHT, values.drawerHeight);
+    values.width = size(properties, WIDTH, values.width);
+    values.height = size(properties, HEIGHT, values.height);
+    values.maximized = Boolean.parseBoolean(properties.getProperty(MAXIMIZED));
+    for (int i = 1; i <= MOST_RECENT; i++) {
+      Optional.ofNullable(properties.getProperty(RECENT + i)).ifPresent(values.recent::add);
+    }
+    return values;
+  }
+
+  private static double size(Properties properties, String name, double usual) {
+    try {
+      double size = Double.parseDouble(properties.getProperty(name, ""));
+      return size >= LEAST_SIZE && size <= LARGEST_SIZE ? size : usual;
+    } catch (NumberFormatException none) {
+      return usual;
+    }
+  }
+
+  private Properties properties() {
+    Properties properties = new Properties();
+    properties.setProperty(DARK, Boolean.toString(values.dark));
+    properties.setProperty(DRAWER_OPEN, Boolean.toString(values.drawerOpen));
+    properties.setProperty(DRAWER_HEIGHT, Double.toString(values.drawerHeight));
+    properties.setProperty(WIDTH, Double.toString(values.width));
+    properties.setProperty(HEIGHT, Double.toString(values.height));
+    properties.setProperty(MAXIMIZED, Boolean.toString(values.maximized));
+    for (int i = 0; i < values.recent.size(); i++) {
+      properties.setProperty(RECENT + (i + 1), values.recent.get(i));
+    }
+    return properties;
   }
 
   private static Path folder() {
@@ -85,7 +131,7 @@ final class Settings {
 
   /** Files opened or saved last, newest first; those that are gone are left out. */
   List<Path> recent() {
-    return values.recent.stream().map(Path::of).filter(Files::isRegularFile).toList();
+    return values.recent.stream().map(File::new).filter(File::isFile).map(File::toPath).toList();
   }
 
   void addRecent(Path path) {
@@ -104,7 +150,7 @@ final class Settings {
       Files.createDirectories(file.getParent());
       Path fresh = Files.createTempFile(file.getParent(), "settings", ".tmp");
       try (Writer writer = Files.newBufferedWriter(fresh)) {
-        GSON.toJson(values, writer);
+        properties().store(writer, "Clampwright: what is remembered between runs");
       }
       Files.move(fresh, file, StandardCopyOption.REPLACE_EXISTING);
       return true;

@@ -1,18 +1,17 @@
 package clampwright.app;
 
 import clampwright.edit.SketchModel;
-import clampwright.figure.working.Headline;
 import clampwright.paint.Palette;
 import clampwright.paint.canvas.FigureCanvas;
-import clampwright.view.found.FoundPane;
-import clampwright.view.given.GivenPane;
-import clampwright.view.schedule.SchedulePane;
 import clampwright.view.section.SectionPane;
-import clampwright.view.working.WorkingPane;
+import java.util.function.Function;
 import java.util.function.Supplier;
-import javafx.beans.property.StringProperty;
+import javafx.beans.value.ObservableValue;
+import javafx.geometry.Insets;
+import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
+import javafx.scene.layout.Background;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
@@ -24,65 +23,75 @@ import javafx.scene.layout.VBox;
  * when the window stands.
  */
 final class WindowLayout {
-  private final SketchModel model;
+  /** Room kept for the parts until they come [px]; the style sheet gives them the same. */
+  private static final double TOOL_ROW = 46;
+
+  private static final double GIVEN = 258;
+  private static final double FOUND = 306;
+  private static final double STATUS = 26;
+
   private final Settings settings;
   private final Later later = new Later();
   private final SectionPane section;
   private final BorderPane root = new BorderPane();
-  private Drawer drawer;
-  private WorkingPane working;
-  private ToolRow tools;
+  private WindowParts parts;
 
+  /**
+   * The layout.
+   *
+   * @param making makes the parts, after the first frame
+   */
   WindowLayout(
-      SketchModel model, Settings settings, Supplier<ToolRow> toolRow, StringProperty hint) {
-    this.model = model;
+      SketchModel model,
+      Settings settings,
+      Supplier<WindowParts> making,
+      ObservableValue<String> hint) {
     this.settings = settings;
-    later.add(
-        () -> {
-          Looks.showTheme(settings.values().dark);
-          Looks.showStyles(root.getScene(), settings.values().dark);
-        });
-    StackPane top =
-        later.place(
-            "tool-place",
-            () -> {
-              tools = toolRow.get();
-              tools.showLook(settings.values().dark);
-              return tools;
-            });
+    later.add(() -> showTheme(settings.values().dark));
+    later.add(() -> parts = making.get());
+    root.setBackground(Background.fill(Looks.window(settings.values().dark)));
     showPalette();
     section = new SectionPane(model);
     StackPane sheet = new StackPane(section);
     sheet.getStyleClass().add("sheet-edge");
     StackPane desk = new StackPane(sheet);
     desk.getStyleClass().add("section-place");
+    desk.setPadding(new Insets(10));
     BorderPane panes = new BorderPane(desk);
-    panes.setRight(later.place("found-place", () -> new FoundPane(model, this::openWorking)));
-    panes.setLeft(later.place("given-place", () -> new GivenPane(model)));
-    root.setCenter(panes);
+    StackPane top = place("tool-place", WindowParts::tools);
+    StackPane right = place("found-place", WindowParts::found);
+    StackPane left = place("given-place", WindowParts::given);
+    StackPane drawer = drawerPlace();
+    StackPane status = place("status-place", parts -> parts.status(hint));
+    top.setMinHeight(TOOL_ROW);
+    right.setMinWidth(FOUND);
+    left.setMinWidth(GIVEN);
+    status.setMinHeight(STATUS);
+    panes.setRight(right);
+    panes.setLeft(left);
     root.setTop(top);
-    root.setBottom(
-        new VBox(drawerPlace(), later.place("status-place", () -> new StatusLine(hint))));
+    root.setCenter(panes);
+    root.setBottom(new VBox(drawer, status));
+  }
+
+  private StackPane place(String style, Function<WindowParts, Node> content) {
+    StackPane place = later.place(style, () -> content.apply(parts));
+    place.setBackground(Background.fill(Looks.pane(settings.values().dark)));
+    return place;
   }
 
   private StackPane drawerPlace() {
     Settings.Values values = settings.values();
-    StackPane place =
-        later.place(
-            "drawer-place",
-            () -> {
-              working = new WorkingPane(model);
-              drawer = new Drawer(values.drawerHeight);
-              drawer.add("Schedule", () -> new SchedulePane(model));
-              drawer.add("Working", () -> working);
-              drawer.show("Schedule");
-              drawer.openProperty().set(values.drawerOpen);
-              return drawer;
-            });
+    StackPane place = place("drawer-place", WindowParts::drawerNode);
     place.setMinHeight(Region.USE_PREF_SIZE);
     place.setPrefHeight(values.drawerOpen ? values.drawerHeight : 0);
     later.add(() -> place.setPrefHeight(Region.USE_COMPUTED_SIZE));
     return place;
+  }
+
+  private void showTheme(boolean dark) {
+    Looks.showTheme(dark);
+    Looks.showStyles(root.getScene(), dark);
   }
 
   private void showPalette() {
@@ -91,11 +100,6 @@ final class WindowLayout {
 
   SectionPane section() {
     return section;
-  }
-
-  private void openWorking(Headline headline) {
-    drawer().show("Working");
-    working.show(headline);
   }
 
   Parent root() {
@@ -115,12 +119,14 @@ final class WindowLayout {
   /** The drawer; made at once when it is wanted before its turn. */
   Drawer drawer() {
     later.finish();
-    return drawer;
+    return parts.drawer();
   }
 
-  void showLook(boolean dark) {
+  /** Shows the window in the look that the settings name. */
+  void showLook() {
     later.finish();
-    tools.showLook(dark);
+    parts.showLook(settings.values().dark);
     showPalette();
+    showTheme(settings.values().dark);
   }
 }

@@ -52,7 +52,7 @@ class DocumentsTest implements Documents.Desk {
 
   @BeforeEach
   void open() throws IOException {
-    settings = Settings.of(folder.resolve("settings/settings.json"));
+    settings = Settings.of(folder.resolve("settings/settings.properties"));
     documents = new Documents(model, answers, answers, settings, this);
     other = folder.resolve("other.joint.json");
     SketchFile.write(Sketches.cover().withName("Other"), other);
@@ -212,7 +212,7 @@ class DocumentsTest implements Documents.Desk {
   void settingsThatCannotBeKeptCostTheMemoryOnly() throws IOException {
     Path file = folder.resolve("a-file");
     Files.writeString(file, "in the way");
-    Settings unwritable = Settings.of(file.resolve("settings.json"));
+    Settings unwritable = Settings.of(file.resolve("settings.properties"));
 
     assertFalse(unwritable.keep());
     assertEquals(List.of(), unwritable.recent());

@@ -14,6 +14,7 @@ import clampwright.store.Stored;
 import clampwright.view.MathText;
 import clampwright.view.Sketches;
 import java.nio.file.Path;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
@@ -22,6 +23,7 @@ import javafx.scene.Node;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCombination;
 import javafx.stage.Stage;
 import javafx.stage.WindowEvent;
 import org.junit.jupiter.api.BeforeEach;
@@ -336,6 +338,18 @@ class WindowTest {
     robot.interact(window::close);
     assertEquals(2, answers.asked.size());
     assertFalse(stage.isShowing());
+  }
+
+  @Test
+  void noTwoCommandsShareAKey() {
+    List<KeyCombination> keys =
+        new WindowCommands(window, model, window.documents())
+            .commands().menus().values().stream()
+                .flatMap(List::stream)
+                .flatMap(command -> command.keys().stream())
+                .toList();
+
+    assertEquals(new HashSet<>(keys).size(), keys.size(), keys.toString());
   }
 
   @Test

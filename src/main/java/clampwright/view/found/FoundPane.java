@@ -28,6 +28,7 @@ public final class FoundPane extends ScrollPane {
   private final Map<Finding, Readout> readouts = new EnumMap<>(Finding.class);
   private final MethodSpread spread = new MethodSpread();
   private final MethodList methods = new MethodList();
+  private final Region noticeRule = rule();
   private final Remarks notices;
   private final Remarks reasons;
   private final VBox solvedSheet = new VBox();
@@ -52,7 +53,8 @@ public final class FoundPane extends ScrollPane {
     }
     solvedSheet
         .getChildren()
-        .addAll(readoutGrid(), rule(), heading("Φ by method"), spread, methods, rule(), notices);
+        .addAll(
+            readoutGrid(), rule(), heading("Φ by method"), spread, methods, noticeRule, notices);
     solvedSheet.getStyleClass().add("solved");
     Label none = new Label("No solution yet");
     none.getStyleClass().add("no-solution");
@@ -114,6 +116,7 @@ public final class FoundPane extends ScrollPane {
     readouts.forEach((finding, readout) -> readout.show(finding.of(solved), sketch.units()));
     spread.show(solved.members(), sketch.joint().method().stiffness());
     methods.show(solved.members(), sketch.joint().method().stiffness(), sketch.units());
+    noticeRule.setVisible(!solved.notices().isEmpty());
     notices.show(
         solved.notices().stream()
             .map(notice -> new Remark(notice.part(), Sentences.notice(notice)))

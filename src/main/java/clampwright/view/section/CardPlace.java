@@ -23,14 +23,13 @@ final class CardPlace {
 
   private final SectionPane pane;
   private final SketchModel model;
-  private final PartCards cards;
+  private PartCards cards;
   private final StackPane frame = new StackPane();
   private Part part = Part.JOINT;
 
   CardPlace(SectionPane pane, SketchModel model) {
     this.pane = pane;
     this.model = model;
-    cards = new PartCards(model);
     frame.getStyleClass().add("part-card");
     frame.setId("part-card");
     frame.setVisible(false);
@@ -38,6 +37,14 @@ final class CardPlace {
     frame.addEventHandler(ScrollEvent.ANY, ScrollEvent::consume);
     frame.addEventHandler(KeyEvent.KEY_PRESSED, this::keyPressed);
     frame.addEventHandler(ActionEvent.ACTION, this::entered);
+  }
+
+  /** The card of the selected part; the cards are made when the first is wanted. */
+  private Optional<Region> card() {
+    if (cards == null) {
+      cards = new PartCards(model);
+    }
+    return cards.ofSelection();
   }
 
   Node node() {
@@ -50,7 +57,7 @@ final class CardPlace {
 
   /** Opens the card of the selected part, with the focus in its first number. */
   void open(Pointer at) {
-    Optional<Region> card = cards.ofSelection();
+    Optional<Region> card = card();
     if (card.isPresent()) {
       part = model.selection();
       frame.getChildren().setAll(card.get());
@@ -99,7 +106,7 @@ final class CardPlace {
   void follow() {
     if (isOpen() && !model.selection().equals(part)) {
       part = model.selection();
-      Optional<Region> card = cards.ofSelection();
+      Optional<Region> card = card();
       if (card.isEmpty()) {
         close();
       } else if (!frame.getChildren().contains(card.get())) {
