@@ -1,6 +1,7 @@
 package clampwright.app;
 
 import clampwright.figure.Sentences;
+import clampwright.view.MathText;
 import clampwright.view.section.SectionPane;
 import java.util.ArrayList;
 import java.util.List;
@@ -118,11 +119,10 @@ final class HelpPages {
     return label;
   }
 
-  private static Label paragraph(String text) {
-    Label label = new Label(text);
-    label.setWrapText(true);
-    label.setMaxWidth(560);
-    label.getStyleClass().add("help-text");
-    return label;
+  private static MathText paragraph(String text) {
+    MathText paragraph = new MathText("help-text");
+    paragraph.show(text);
+    paragraph.setMaxWidth(560);
+    return paragraph;
   }
 }
