@@ -9,6 +9,7 @@ import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.ElementFinding;
 import clampwright.mechanics.LoadSharing;
 import clampwright.mechanics.MemberStiffness;
+import clampwright.mechanics.Side;
 import clampwright.mechanics.Zone;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
@@ -58,9 +59,9 @@ final class FoundTable {
             + ", "
             + text(Dimension.LENGTH, zone.length())
             + " apart");
-    table.row("head's washer", Sentences.washerDecision(zone.headWasher(), units));
+    table.row("head's washer", Sentences.washerDecision(zone.headWasher(), Side.HEAD, units));
     if (!sketch.joint().fastener().isTapped()) {
-      table.row("nut's washer", Sentences.washerDecision(zone.nutWasher(), units));
+      table.row("nut's washer", Sentences.washerDecision(zone.nutWasher(), Side.NUT, units));
     }
     return table.text();
   }

@@ -126,11 +126,12 @@ final class ConeDrawing {
     return List.of(drawing.at(side * r1, z1), drawing.at(side * r2, z2));
   }
 
-  /** The effective cylinder of each element, dotted. */
+  /** The effective cylinder of each element, dotted; what a straight edge cuts off is not drawn. */
   void cylinders() {
     for (int i = 0; i < solved.elements().size(); i++) {
       ElementFinding finding = solved.elements().get(i);
-      double radius = Math.min(finding.effectiveDiameter() / 2, layout.reach());
+      double limit = Math.min(layout.reach(), outer(i));
+      double radius = Math.min(finding.effectiveDiameter() / 2, limit);
       List<Point> points = new ArrayList<>();
       points.add(drawing.at(-layout.holeRadius(i), finding.from()));
       points.add(drawing.at(-radius, finding.from()));

@@ -1,18 +1,25 @@
 package clampwright.figure;
 
 import clampwright.joint.Element;
-import clampwright.joint.Feature;
-import clampwright.joint.Outline;
+import clampwright.joint.Joint;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
 import java.util.List;
 
-/** Thicknesses and names in the right column; edge distances of strips below the stack. */
+/** Thicknesses and names in the right column. */
 final class Dimensions {
-  static final double COLUMN = 44;
   private static final double USUAL_SPACING = 8.2;
+  private static final double NAME_SIZE = 3.1;
+  private static final double MATERIAL_SIZE = 2.7;
+
+  /** From the reach of the stack to the names, and from the names to the edge [sheet mm]. */
+  private static final double BEFORE_NAMES = 19;
+
+  private static final double BEHIND_NAMES = 3;
+  private static final double NARROWEST = 22;
+  private static final double WIDEST = 42;
 
   private final Drawing drawing;
   private final StackLayout layout;
@@ -43,18 +50,28 @@ final class Dimensions {
     for (int i = 0; i < count; i++) {
       thickness(i, wanted[i], places[i], spacing);
     }
-    for (int i = 0; i < count; i++) {
-      if (layout.joint().elements().get(i).outline() instanceof Outline.Strip strip) {
-        edgeDistance(i, strip);
-        return;
-      }
+  }
+
+  /** Width of the whole column, as wide as the names ask for [sheet mm]. */
+  static double column(Joint joint) {
+    return BEFORE_NAMES + nameRoom(joint) + BEHIND_NAMES;
+  }
+
+  private static double nameRoom(Joint joint) {
+    double widest = NARROWEST;
+    for (int i = 0; i < joint.elements().size(); i++) {
+      Element element = joint.elements().get(i);
+      widest = Math.max(widest, TextWidth.of(name(element, i), NAME_SIZE, Mark.Weight.REGULAR));
+      widest =
+          Math.max(widest, TextWidth.of(material(element), MATERIAL_SIZE, Mark.Weight.REGULAR));
     }
+    return Math.min(WIDEST, widest);
   }
 
   /** x of the dimension line: right of the stack, kept on the sheet. */
   private double lineX() {
     double right = drawing.sheet().x(layout.reach()) + 4;
-    return Math.min(right, drawing.sheet().width() - COLUMN + 4);
+    return Math.min(right, drawing.sheet().width() - column(layout.joint()) + 4);
   }
 
   private void extension(int i) {
@@ -80,6 +97,8 @@ final class Dimensions {
         Tag.of(Role.LEADER, part),
         List.of(new Point(x, wanted), new Point(x + 2.5, place), new Point(x + 4, place)));
     double size = Math.min(3.3, 0.75 * spacing);
+    double nameSize = Math.min(size, NAME_SIZE);
+    double room = nameRoom(layout.joint());
     boolean twoLines = spacing > 6.5;
     double base = twoLines ? place + 0.1 : place + 0.36 * size;
     drawing.text(
@@ -94,17 +113,17 @@ final class Dimensions {
         Tag.of(Role.NAME, part),
         x + 15,
         base,
-        shortened(element.name().isBlank() ? "layer " + (i + 1) : element.name()),
+        TextWidth.cut(name(element, i), room, nameSize, Mark.Weight.REGULAR),
         Mark.Anchor.START,
-        Math.min(size, 3.1));
+        nameSize);
     if (twoLines) {
       drawing.text(
           Tag.of(Role.SUBNAME, part),
           x + 15,
           place + 3.4,
-          shortened(material(element)),
+          TextWidth.cut(material(element), room, MATERIAL_SIZE, Mark.Weight.REGULAR),
           Mark.Anchor.START,
-          2.7);
+          MATERIAL_SIZE);
     }
   }
 
@@ -113,33 +132,7 @@ final class Dimensions {
     return element.material().name().replaceAll("\\s*\\(.*\\)", "");
   }
 
-  private static String shortened(String text) {
-    return text.length() <= 17 ? text : text.substring(0, 16) + "…";
-  }
-
-  private void edgeDistance(int i, Outline.Strip strip) {
-    Part part = Part.element(i);
-    double y = drawing.sheet().y(layout.stack()) + 5;
-    double edge = drawing.sheet().x(-strip.left());
-    double axis = drawing.sheet().axisX();
-    double from = drawing.sheet().y(layout.to(i));
-    drawing.line(Tag.of(Role.LEADER, part), new Point(edge, from + 0.8), new Point(edge, y + 1.5));
-    double nut = drawing.sheet().x(-layout.joint().fastener().head().rim() * 0.58);
-    double textX = (edge + Math.min(nut, axis)) / 2;
-    drawing.add(
-        new Mark.Arrow(
-            Tag.of(Role.DIMENSION, part, Feature.LEFT_EDGE),
-            new Point(edge, y),
-            new Point(axis, y),
-            true,
-            true));
-    drawing.text(
-        Tag.of(Role.DIMENSION, part),
-        textX,
-        y - 1,
-        Quantities.trimmed(Dimension.LENGTH, sketch.units(), strip.left()),
-        Mark.Anchor.MIDDLE,
-        3.3,
-        Mark.Weight.BOLD);
+  private static String name(Element element, int i) {
+    return element.name().isBlank() ? "layer " + (i + 1) : element.name();
   }
 }

@@ -55,8 +55,7 @@ public enum Role {
   GRIP,
   HOT,
   INSERT_GRIP,
-  /** The value at the pointer while dragging. */
-  DRAG_VALUE,
-  /** Why there is no solution, at the part to blame. */
-  PROBLEM
+  /** Why there is no solution, at the part to blame; the plate under the words. */
+  PROBLEM,
+  PROBLEM_PLATE
 }

@@ -14,6 +14,9 @@ public final class SectionFigure {
   private static final double BOTTOM_MARGIN = 12;
   private static final double LARGEST_SCALE = 12;
 
+  /** An empty sketch leaves room for what will be drawn. */
+  private static final double LARGEST_EMPTY_SCALE = 3.5;
+
   private SectionFigure() {}
 
   /**
@@ -50,8 +53,12 @@ public final class SectionFigure {
       new CallOuts(drawing, layout, solved, sketch.units()).draw();
     }
     new Dimensions(drawing, layout, sketch).draw();
+    new EdgeDistances(drawing, layout, sketch).draw();
     load(drawing, layout, sketch);
-    captions(drawing, count);
+    captions(drawing);
+    if (count == 0) {
+      beginning(drawing, layout);
+    }
     if (options.interactive()) {
       new Handles(drawing, layout).draw(options);
     }
@@ -62,16 +69,21 @@ public final class SectionFigure {
         "Cross-section of " + sketch.name(), sheet.width(), sheet.height(), drawing.marks());
   }
 
-  private static void captions(Drawing drawing, int count) {
+  private static void captions(Drawing drawing) {
     Tag tag = Tag.of(Role.CAPTION, Part.JOINT);
     double right = drawing.sheet().width() - 3.5;
     drawing.text(tag, CallOuts.LEFT, 5, "hand method", Mark.Anchor.START, 2.8);
     drawing.text(tag, right, 5, "parts and dimensions", Mark.Anchor.END, 2.8);
-    if (count == 0) {
-      double x = drawing.sheet().axisX() + 14;
-      double y = drawing.sheet().headY() + 8;
-      drawing.text(tag, x, y, "press here and drag down to draw a layer", Mark.Anchor.START, 3.3);
-    }
+  }
+
+  /** Says in an empty sketch where to begin: beside the bolt, where a layer will be. */
+  private static void beginning(Drawing drawing, StackLayout layout) {
+    Tag tag = Tag.of(Role.CAPTION, Part.JOINT);
+    double beside = Math.max(layout.joint().fastener().head().rim() / 2, layout.nutReach());
+    double x = drawing.sheet().x(beside) + 5;
+    double y = drawing.sheet().headY();
+    drawing.text(tag, x, y, "press here and drag down", Mark.Anchor.START, 3.3);
+    drawing.text(tag, x, y + 4.6, "to draw a layer", Mark.Anchor.START, 3.3);
   }
 
   /** Arrows at head and nut that pull the joint apart, or push it together. */
@@ -87,23 +99,21 @@ public final class SectionFigure {
     boolean pull = axial > 0;
     drawing.add(new Mark.Arrow(tag, new Point(x, top), new Point(x, top - 9), !pull, pull));
     drawing.add(new Mark.Arrow(tag, new Point(x, bottom), new Point(x, bottom + 9), !pull, pull));
-    drawing.text(
-        tag,
-        x + 2,
-        top - 5,
-        Quantities.text(Dimension.FORCE, sketch.units(), Math.abs(axial)),
-        Mark.Anchor.START,
-        3.3,
-        Mark.Weight.BOLD);
+    String text = Quantities.text(Dimension.FORCE, sketch.units(), Math.abs(axial));
+    double rim = drawing.sheet().x(layout.joint().fastener().head().rim() / 2);
+    boolean room = x - rim > TextWidth.of(text, 3.3, Mark.Weight.BOLD) + 4;
+    Mark.Anchor anchor = room ? Mark.Anchor.END : Mark.Anchor.START;
+    drawing.text(tag, room ? x - 2 : x + 2, top - 5, text, anchor, 3.3, Mark.Weight.BOLD);
   }
 
   /** The sheet of this size on which the whole joint and its call-outs fit. */
   public static Sheet fitted(Sketch sketch, double width, double height) {
     StackLayout layout = StackLayout.of(sketch.joint(), Assessment.of(sketch.joint()));
-    double across = Math.max(20, width - LEFT_COLUMN - Dimensions.COLUMN);
+    double across = Math.max(20, width - LEFT_COLUMN - Dimensions.column(sketch.joint()));
     double down = Math.max(20, height - TOP_MARGIN - BOTTOM_MARGIN);
     double tall = layout.bottom() - layout.top();
-    double scale = Math.min(LARGEST_SCALE, Math.min(across / (2 * layout.reach()), down / tall));
+    double largest = layout.stack() == 0 ? LARGEST_EMPTY_SCALE : LARGEST_SCALE;
+    double scale = Math.min(largest, Math.min(across / (2 * layout.reach()), down / tall));
     double headY = TOP_MARGIN + (down - tall * scale) / 2 - layout.top() * scale;
     return new Sheet(width, height, scale, LEFT_COLUMN + across / 2, headY);
   }

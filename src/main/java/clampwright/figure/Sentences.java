@@ -136,21 +136,26 @@ public final class Sentences {
     return rule instanceof AngleRule.Fixed30 ? "30° fixed" : "45° fixed";
   }
 
-  public static String washerRule(WasherRule rule) {
+  /** A washer rule as said at one end of the bolt. */
+  public static String washerRule(WasherRule rule, Side end) {
     return switch (rule) {
       case AUTOMATIC -> "automatic";
       case WHOLE_WASHER -> "whole washer";
-      case FROM_THE_HEADS_EDGE -> "from the head's edge";
+      case FROM_THE_HEADS_EDGE -> fromTheEdge(end);
     };
   }
 
-  /** What became of a washer, and why. */
-  public static String washerDecision(WasherDecision decision, UnitSystem units) {
+  private static String fromTheEdge(Side end) {
+    return "from the " + side(end) + "'s edge";
+  }
+
+  /** What became of the washer at one end of the bolt, and why. */
+  public static String washerDecision(WasherDecision decision, Side end, UnitSystem units) {
     if (decision.taken() == WasherDecision.Taken.NO_WASHER) {
       return "no washer";
     }
     boolean whole = decision.taken() == WasherDecision.Taken.WHOLE_WASHER;
-    String taken = whole ? "whole washer" : "from the head's edge";
+    String taken = whole ? "whole washer" : fromTheEdge(end);
     if (!decision.automatic()) {
       return taken + ", as set";
     }

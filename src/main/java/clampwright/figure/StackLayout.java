@@ -87,6 +87,13 @@ record StackLayout(Joint joint, double[] from, double reach, double length, doub
     return -joint.fastener().head().height();
   }
 
+  /** Half the width of what stands below the stack: the nut, or a tapped bolt's shank [mm]. */
+  double nutReach() {
+    return joint.fastener().anchor() instanceof Anchor.Nut nut
+        ? 0.58 * nut.width()
+        : joint.fastener().thread().diameter() / 2;
+  }
+
   /** Lowest point of bolt, nut and stack [mm]. */
   double bottom() {
     double nut = joint.fastener().isTapped() ? 0 : nutHeight(joint);

@@ -90,8 +90,8 @@ public final class Palette {
     put(Role.GRIP, new Look(accent, 0.5, paper));
     put(Role.HOT, new Look(accent, 0.8, 0));
     put(Role.INSERT_GRIP, new Look(faded(quiet, 0xB0), 0.25, paper));
-    put(Role.DRAG_VALUE, new Look(accent, 0.3, paper));
-    put(Role.PROBLEM, new Look(alarm, 0.4, alarm));
+    put(Role.PROBLEM, new Look(alarm, 0.3, alarm));
+    put(Role.PROBLEM_PLATE, new Look(alarm, 0.3, paper));
   }
 
   private void put(Role role, Look look) {

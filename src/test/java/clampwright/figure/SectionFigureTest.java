@@ -113,6 +113,44 @@ class SectionFigureTest {
     }
   }
 
+  /** Names, thicknesses and materials on the right neither overlap nor leave the sheet. */
+  @Property(tries = 100)
+  void namesNeverOverlap(
+      @ForAll @Size(min = 1, max = 20) List<@DoubleRange(min = 0.2, max = 200) Double> stack,
+      @ForAll @IntRange(min = 1, max = 60) int letters) {
+    Sketch sample = samples().findFirst().orElseThrow();
+    Element plate = sample.joint().elements().get(1).withName("n".repeat(letters));
+    List<Element> elements = new ArrayList<>();
+    stack.forEach(thickness -> elements.add(plate.withThickness(thickness)));
+    Sketch sketch = sample.withJoint(sample.joint().withElements(elements));
+    List<Mark.Text> texts =
+        marks(drawn(sketch, SectionFigure.Options.PLAIN), Mark.Text.class).stream()
+            .filter(text -> text.tag().part().isElement())
+            .toList();
+    for (int i = 0; i < texts.size(); i++) {
+      double[] a = box(texts.get(i));
+      assertTrue(a[0] >= 0 && a[2] <= WIDTH && a[1] >= 0 && a[3] <= HEIGHT, texts.get(i).text());
+      for (int j = 0; j < i; j++) {
+        double[] b = box(texts.get(j));
+        boolean apart = a[0] >= b[2] || b[0] >= a[2] || a[1] >= b[3] || b[1] >= a[3];
+        assertTrue(apart, texts.get(i).text() + " over " + texts.get(j).text());
+      }
+    }
+  }
+
+  /** Left, top, right, bottom; letters reach about 0.73 above and 0.2 below the base line. */
+  private static double[] box(Mark.Text text) {
+    double width = TextWidth.of(text.text(), text.size(), text.weight());
+    double left =
+        switch (text.anchor()) {
+          case START -> text.at().x();
+          case MIDDLE -> text.at().x() - width / 2;
+          case END -> text.at().x() - width;
+        };
+    double base = text.at().y();
+    return new double[] {left, base - 0.73 * text.size(), left + width, base + 0.2 * text.size()};
+  }
+
   @Test
   void edgesAreFoundBeforeBodies() {
     Sketch sketch = samples().findFirst().orElseThrow();

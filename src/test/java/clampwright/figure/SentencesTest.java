@@ -10,6 +10,7 @@ import clampwright.mechanics.MemberStiffness.Why;
 import clampwright.mechanics.Notice;
 import clampwright.mechanics.Reason;
 import clampwright.mechanics.Reason.Cause;
+import clampwright.mechanics.Side;
 import clampwright.mechanics.Zone.WasherDecision;
 import clampwright.mechanics.Zone.WasherDecision.Taken;
 import clampwright.quantity.UnitSystem;
@@ -108,16 +109,24 @@ class SentencesTest {
   void washerDecisionsSayWhy(
       Taken taken, boolean automatic, double overhang, double limit, String words) {
     WasherDecision decision = new WasherDecision(taken, automatic, overhang, limit);
-    assertEquals(words, Sentences.washerDecision(decision, UnitSystem.METRIC));
+    assertEquals(words, Sentences.washerDecision(decision, Side.HEAD, UnitSystem.METRIC));
   }
 
   @Test
   void aWasherWithoutARoundEdgeSaysSo() {
     WasherDecision decision =
         new WasherDecision(Taken.FROM_THE_HEADS_EDGE, true, Double.POSITIVE_INFINITY, 2);
-    String words = Sentences.washerDecision(decision, UnitSystem.METRIC);
+    String words = Sentences.washerDecision(decision, Side.HEAD, UnitSystem.METRIC);
     assertEquals("from the head's edge: the washer has no round edge", words);
     assertFalse(words.contains("Infinity"));
+  }
+
+  @Test
+  void atTheNutItIsTheNutsEdge() {
+    WasherDecision decision = new WasherDecision(Taken.FROM_THE_HEADS_EDGE, false, 1, 4);
+    assertEquals(
+        "from the nut's edge, as set",
+        Sentences.washerDecision(decision, Side.NUT, UnitSystem.METRIC));
   }
 
   @Test

@@ -31,7 +31,7 @@ record FaceSteps(Found found, Side side) {
     steps.add(
         Step.remark(
             "Washer counts",
-            Sentences.washerDecision(decision, found.numbers().units()),
+            Sentences.washerDecision(decision, side, found.numbers().units()),
             decision.automatic() ? Source.PRACTICE : Source.CHOSEN));
     return steps;
   }

@@ -13,6 +13,7 @@ import clampwright.joint.WasherRule;
 import clampwright.mechanics.Assessment;
 import clampwright.mechanics.MemberStiffness;
 import clampwright.mechanics.Reason;
+import clampwright.mechanics.Side;
 import clampwright.mechanics.Zone.WasherDecision;
 import clampwright.quantity.Dimension;
 import clampwright.view.OncePerPulse;
@@ -72,18 +73,18 @@ final class MethodSection extends Section {
     nutAngleField.setAutomatic(OptionalDouble.of(Math.toRadians(AngleFields.headDegrees(sketch))));
     setShown(body, method(sketch).bodyDiameter().isPresent() || isBodyAskedFor());
     if (model.assessment() instanceof Assessment.Solved solved) {
-      show(headWasher, solved.zone().headWasher());
-      show(nutWasher, solved.zone().nutWasher());
+      show(headWasher, solved.zone().headWasher(), Side.HEAD);
+      show(nutWasher, solved.zone().nutWasher(), Side.NUT);
     } else {
       setShown(headWasher, false);
       setShown(nutWasher, false);
     }
   }
 
-  private void show(Label label, WasherDecision decision) {
+  private void show(Label label, WasherDecision decision, Side end) {
     boolean washer = decision.taken() != WasherDecision.Taken.NO_WASHER;
     setShown(label, washer && decision.automatic());
-    String sentence = Sentences.washerDecision(decision, model.sketch().units());
+    String sentence = Sentences.washerDecision(decision, end, model.sketch().units());
     label.setText(sentence.replaceAll("(\\d) (?=(mm|in)\\b)", "$1\u00a0"));
   }
 
@@ -138,20 +139,20 @@ final class MethodSection extends Section {
   }
 
   static SketchChoice<WasherRule> headWasherRule() {
-    return washerRule("Washer rule at the head", Joint::headWasherRule, Joint::withHeadWasherRule);
+    return washerRule(Side.HEAD, Joint::headWasherRule, Joint::withHeadWasherRule);
   }
 
   static SketchChoice<WasherRule> nutWasherRule() {
-    return washerRule("Washer rule at the nut", Joint::nutWasherRule, Joint::withNutWasherRule);
+    return washerRule(Side.NUT, Joint::nutWasherRule, Joint::withNutWasherRule);
   }
 
   private static SketchChoice<WasherRule> washerRule(
-      String name, Function<Joint, WasherRule> read, BiFunction<Joint, WasherRule, Joint> write) {
+      Side end, Function<Joint, WasherRule> read, BiFunction<Joint, WasherRule, Joint> write) {
     return SketchChoice.among(
-        name,
+        "Washer rule at the " + Sentences.side(end),
         sketch -> Optional.of(read.apply(sketch.joint())),
         (sketch, rule) -> sketch.withJoint(joint -> write.apply(joint, rule)),
-        Sentences::washerRule,
+        rule -> Sentences.washerRule(rule, end),
         List.of(WasherRule.values()));
   }
 }
