@@ -11,7 +11,7 @@ import clampwright.view.OncePerPulse;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import javafx.geometry.Bounds;
+import javafx.application.Platform;
 import javafx.geometry.Pos;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.ScrollPane;
@@ -28,6 +28,7 @@ public final class SchedulePane extends BorderPane {
   private final SketchModel model;
   private final HeaderLine header = new HeaderLine();
   private final VBox body = new VBox();
+  private final ScrollPane scroll = new ScrollPane(body);
   private final List<ElementLine> lines = new ArrayList<>();
 
   public SchedulePane(SketchModel model) {
@@ -35,17 +36,27 @@ public final class SchedulePane extends BorderPane {
     getStyleClass().add("schedule");
     setAccessibleRole(AccessibleRole.TABLE_VIEW);
     setAccessibleText("Schedule of the stack");
-    ScrollPane scroll = new ScrollPane(body);
     scroll.setFitToWidth(true);
     scroll.getStyleClass().add("schedule-body");
     scroll.setFocusTraversable(false);
-    // The columns stand under their titles also when a scroll bar takes room beside them.
-    header.maxWidthProperty().bind(scroll.viewportBoundsProperty().map(Bounds::getWidth));
+    // A scroll bar comes and goes while the scroll pane is laid out, so only the next pulse can
+    // lay the titles out by it.
+    scroll
+        .viewportBoundsProperty()
+        .addListener((observable, was, is) -> Platform.runLater(this::requestLayout));
     BorderPane.setAlignment(header, Pos.TOP_LEFT);
     setTop(header);
     setCenter(scroll);
     OncePerPulse.keep(this, this::follow, model.sketchProperty(), model.assessmentProperty());
     model.selectionProperty().subscribe((Part was, Part is) -> mark());
+  }
+
+  /** The columns stand under their titles also when a scroll bar takes room beside them. */
+  @Override
+  protected void layoutChildren() {
+    super.layoutChildren();
+    scroll.layout();
+    header.resize(scroll.getViewportBounds().getWidth(), header.getHeight());
   }
 
   private void follow() {
