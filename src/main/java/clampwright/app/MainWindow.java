@@ -11,17 +11,22 @@ import javafx.application.Platform;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import javafx.event.Event;
+import javafx.geometry.Rectangle2D;
 import javafx.scene.Node;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.TransferMode;
+import javafx.stage.Screen;
 import javafx.stage.Stage;
 
 /** The window of the editor: what it does when asked by menu, key, mouse or system. */
 final class MainWindow implements Documents.Desk {
   private static final String UNTAKEN =
       "A field still holds text that could not be taken over; it is marked.";
+
+  /** Share of a small screen that the window takes when it is not maximized. */
+  private static final double ROOM = 0.92;
 
   private final Stage stage;
   private final SketchModel model;
@@ -58,9 +63,11 @@ final class MainWindow implements Documents.Desk {
     stage.setScene(scene);
     stage.setMinWidth(1000);
     stage.setMinHeight(640);
-    stage.setWidth(values.width);
-    stage.setHeight(values.height);
-    stage.setMaximized(values.maximized);
+    Rectangle2D screen = Screen.getPrimary().getVisualBounds();
+    boolean fits = values.width < screen.getWidth() && values.height < screen.getHeight();
+    stage.setWidth(Math.min(values.width, ROOM * screen.getWidth()));
+    stage.setHeight(Math.min(values.height, ROOM * screen.getHeight()));
+    stage.setMaximized(values.maximized || !fits);
     stage
         .titleProperty()
         .bind(model.sketchProperty().map(sketch -> sketch.name() + " — Clampwright"));

@@ -19,16 +19,21 @@ import javafx.scene.text.Text;
 
 /** The row above the panes: mark, menus, the sketch's name, units, light or dark. */
 final class ToolRow extends StackPane {
+  private static final double GAP = 12;
+
   private final Button look = new Button();
+  private final HBox left;
+  private final HBox middle;
+  private final HBox right;
 
   ToolRow(SketchModel model, MenuBar menus, Runnable switchLook) {
     getStyleClass().add("tool-row");
     Label program = new Label("Clampwright");
     program.getStyleClass().add("program");
-    HBox left = new HBox(10, new LogoMark(), program, menus);
+    left = new HBox(10, new LogoMark(), program, menus);
     HBox.setMargin(menus, new javafx.geometry.Insets(0, 0, 0, 12));
-    HBox right = new HBox(8, unitSwitch(model), look);
-    HBox middle = new HBox(2, name(model), unsavedDot(model));
+    right = new HBox(8, unitSwitch(model), look);
+    middle = new HBox(2, name(model), unsavedDot(model));
     for (HBox group : new HBox[] {left, middle, right}) {
       group.setPickOnBounds(false);
       group.setMaxWidth(Region.USE_PREF_SIZE);
@@ -42,6 +47,18 @@ final class ToolRow extends StackPane {
     look.setId("look");
     look.setOnAction(event -> switchLook.run());
     getChildren().addAll(middle, left, right);
+  }
+
+  /** The name stands in the middle of the window, or of what the menus leave free. */
+  @Override
+  protected void layoutChildren() {
+    super.layoutChildren();
+    double from = left.getLayoutX() + left.getWidth() + GAP;
+    double to = right.getLayoutX() - GAP;
+    double width = Math.max(0, Math.min(middle.prefWidth(-1), to - from));
+    double centred = (getWidth() - width) / 2;
+    middle.resize(width, middle.getHeight());
+    middle.setLayoutX(snapPositionX(Math.max(from, Math.min(to - width, centred))));
   }
 
   /** Names the look that the button switches to. */
