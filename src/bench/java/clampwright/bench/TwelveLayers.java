@@ -1,17 +1,19 @@
 package clampwright.bench;
 
 import clampwright.joint.Anchor;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Head;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
 import clampwright.joint.Outline;
-import clampwright.joint.Preload;
 import clampwright.joint.ScrewThread;
+import clampwright.joint.Service;
 import clampwright.joint.Strength;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import java.util.ArrayList;
 import java.util.List;
@@ -42,8 +44,9 @@ final class TwelveLayers {
         WasherRule.AUTOMATIC,
         WasherRule.AUTOMATIC,
         Method.USUAL,
-        new Preload(25_000),
-        new Load(8_000, 0.5));
+        Tightening.force(25_000),
+        Service.of(LoadCase.steady("Working load", 8_000, 0.5)),
+        Criteria.USUAL);
   }
 
   private static Fastener fastener(Material steel) {

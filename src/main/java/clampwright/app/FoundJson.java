@@ -7,6 +7,7 @@ import clampwright.joint.Joint;
 import clampwright.joint.Sketch;
 import clampwright.joint.StiffnessMethod;
 import clampwright.mechanics.Assessment.Solved;
+import clampwright.mechanics.Band;
 import clampwright.mechanics.ElementFinding;
 import clampwright.mechanics.LoadSharing;
 import clampwright.mechanics.MemberStiffness;
@@ -33,29 +34,34 @@ final class FoundJson {
     root.add("angle", angle(joint.method().angle(), solved.zone()));
     root.add("zone", zone(solved.zone()));
     root.add("elements", elements(joint, solved));
-    root.add("memberStiffness", members(solved.members()));
+    root.add("memberStiffness", members(solved));
     root.addProperty("chosenMethod", word(joint.method().stiffness()));
     number(root, "boltStiffness", solved.bolt().stiffness());
-    addLoads(root, solved.sharing());
+    addLoads(root, solved);
     root.add("notices", notices(joint, solved));
     root.addProperty("caution", Sentences.CAUTION);
     return GSON.toJson(root) + "\n";
   }
 
-  /** The preload has no scatter yet: one value stands for the band. */
-  private static void addLoads(JsonObject root, LoadSharing sharing) {
-    JsonObject preload = new JsonObject();
-    number(preload, "min", sharing.preload());
-    number(preload, "nominal", sharing.preload());
-    number(preload, "max", sharing.preload());
+  /** The first load case. */
+  private static void addLoads(JsonObject root, Solved solved) {
+    LoadSharing sharing = solved.sharing();
     JsonObject load = new JsonObject();
-    number(load, "axial", sharing.axial());
+    number(load, "axial", sharing.axialMax());
     number(root, "loadFactor", sharing.loadFactor());
-    root.add("preload", preload);
+    root.add("preload", band(sharing.preload()));
     root.add("load", load);
     number(root, "boltLoad", sharing.boltLoad());
     number(root, "clampLoad", sharing.clampLoad());
     number(root, "partingLoad", sharing.partingLoad());
+  }
+
+  private static JsonObject band(Band band) {
+    JsonObject json = new JsonObject();
+    number(json, "min", band.min());
+    number(json, "nominal", band.nominal());
+    number(json, "max", band.max());
+    return json;
   }
 
   private static JsonObject angle(AngleRule rule, Zone zone) {
@@ -129,13 +135,14 @@ final class FoundJson {
     };
   }
 
-  private static JsonObject members(MemberStiffness members) {
+  private static JsonObject members(Solved solved) {
+    MemberStiffness members = solved.members();
     JsonObject json = new JsonObject();
     for (StiffnessMethod method : StiffnessMethod.values()) {
       JsonObject result = new JsonObject();
       if (members.get(method) instanceof MemberStiffness.Value value) {
         number(result, "stiffness", value.stiffness());
-        number(result, "loadFactor", value.loadFactor());
+        number(result, "loadFactor", value.loadFactor(solved.sharing().introduction()));
       } else if (members.get(method) instanceof MemberStiffness.NotApplicable not) {
         result.addProperty("notApplicable", not.why().text());
       }

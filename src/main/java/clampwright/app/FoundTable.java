@@ -111,11 +111,13 @@ final class FoundTable {
     readout(table, members, Dimension.STIFFNESS, sharing.memberStiffness());
     readout(table, "bolt", Dimension.STIFFNESS, solved.bolt().stiffness());
     readout(table, "load factor Φ", Dimension.RATIO, sharing.loadFactor());
-    readout(table, "preload", Dimension.FORCE, sharing.preload());
-    readout(table, "axial load", Dimension.FORCE, sharing.axial());
-    readout(table, "bolt load", Dimension.FORCE, sharing.boltLoad());
-    readout(table, "clamp load", Dimension.FORCE, sharing.clampLoad());
-    readout(table, "parts at", Dimension.FORCE, sharing.partingLoad());
+    readout(table, "preload in service, least", Dimension.FORCE, sharing.preload().min());
+    readout(table, "preload in service, nominal", Dimension.FORCE, sharing.preload().nominal());
+    readout(table, "preload in service, most", Dimension.FORCE, sharing.preload().max());
+    readout(table, "axial load", Dimension.FORCE, sharing.axialMax());
+    readout(table, "bolt load, most", Dimension.FORCE, sharing.boltLoad());
+    readout(table, "clamp load, least", Dimension.FORCE, sharing.clampLoad());
+    readout(table, "parts at, least", Dimension.FORCE, sharing.partingLoad());
     return table.text();
   }
 
@@ -130,7 +132,11 @@ final class FoundTable {
       String name = Sentences.method(method);
       if (solved.members().get(method) instanceof MemberStiffness.Value value) {
         String stiffness = number(Dimension.STIFFNESS, value.stiffness());
-        table.row(name, stiffness, number(Dimension.RATIO, value.loadFactor()), "");
+        table.row(
+            name,
+            stiffness,
+            number(Dimension.RATIO, value.loadFactor(solved.sharing().introduction())),
+            "");
       } else if (solved.members().get(method) instanceof MemberStiffness.NotApplicable not) {
         table.row(name, "–", "–", "not applicable: " + not.why().text());
       }

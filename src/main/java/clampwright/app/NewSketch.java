@@ -1,12 +1,14 @@
 package clampwright.app;
 
 import clampwright.catalog.Catalogue;
+import clampwright.joint.Criteria;
 import clampwright.joint.Fastener;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Method;
-import clampwright.joint.Preload;
+import clampwright.joint.Service;
 import clampwright.joint.Sketch;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import clampwright.quantity.UnitSystem;
 import java.util.List;
@@ -29,8 +31,9 @@ final class NewSketch {
             WasherRule.AUTOMATIC,
             WasherRule.AUTOMATIC,
             Method.USUAL,
-            new Preload(preload),
-            new Load(0, 1));
+            Tightening.force(preload),
+            Service.of(LoadCase.steady("Working load", 0, 1)),
+            Criteria.USUAL);
     return new Sketch("New sketch", joint, units);
   }
 }

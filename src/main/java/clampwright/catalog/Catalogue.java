@@ -152,7 +152,14 @@ public final class Catalogue {
     all.addAll(washers(thread));
     all.addAll(materials);
     all.addAll(strengths.all());
-    return all.stream().filter(entry -> entry.value().equals(value)).findFirst().map(Entry::origin);
+    Object listed =
+        value instanceof Material material
+            ? material.withTensile(OptionalDouble.empty()).withPressureLimit(OptionalDouble.empty())
+            : value;
+    return all.stream()
+        .filter(entry -> entry.value().equals(listed))
+        .findFirst()
+        .map(Entry::origin);
   }
 
   /**

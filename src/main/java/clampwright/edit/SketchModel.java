@@ -5,6 +5,7 @@ import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.Assessment;
 import java.util.function.UnaryOperator;
+import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyBooleanProperty;
 import javafx.beans.property.ReadOnlyBooleanWrapper;
@@ -12,6 +13,7 @@ import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.value.ObservableValue;
 
 /**
@@ -41,6 +43,8 @@ public final class SketchModel {
   private Assessment lastAssessment;
 
   private final ReadOnlyObjectWrapper<Sketch> opened;
+
+  private final IntegerProperty shownCase = new SimpleIntegerProperty(this, "shownCase");
 
   /** A model that starts with a saved sketch. */
   public SketchModel(Sketch sketch) {
@@ -88,6 +92,16 @@ public final class SketchModel {
 
   public void select(Part part) {
     selection.set(part);
+  }
+
+  /** Index of the load case that is shown; see {@link #loadCase}. */
+  public IntegerProperty shownCaseProperty() {
+    return shownCase;
+  }
+
+  /** Index of the load case that readouts and drawing follow; one that the sketch has. */
+  public int loadCase() {
+    return Math.max(0, Math.min(shownCase.get(), sketch().joint().service().loads().size() - 1));
   }
 
   /** Changes the sketch as one step of the history; no step when nothing changes. */
@@ -240,6 +254,7 @@ public final class SketchModel {
   public void open(Sketch sketch) {
     endTyping();
     history = new History(sketch);
+    shownCase.set(0);
     show(sketch, Part.JOINT);
     opened.set(sketch);
     tell();

@@ -12,6 +12,7 @@ import clampwright.joint.Sketch;
 import clampwright.quantity.UnitSystem;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.IntUnaryOperator;
 
 /**
  * Changes of the stack: what comes in, goes out, and in what order. Pure; indices from the head.
@@ -57,11 +58,12 @@ public final class Stacking {
     List<Element> elements = new ArrayList<>(sketch.joint().elements());
     elements.add(index, element);
     String name = verb + Names.of(sketch.joint().withElements(elements), Part.element(index));
-    return new Change(name, restacked(sketch, elements), Part.element(index));
+    Sketch added = restacked(sketch, elements, i -> i < index ? i : i + 1);
+    return new Change(name, added, Part.element(index));
   }
 
-  private static Sketch restacked(Sketch sketch, List<Element> elements) {
-    return sketch.withJoint(joint -> joint.withElements(elements));
+  private static Sketch restacked(Sketch sketch, List<Element> elements, IntUnaryOperator place) {
+    return sketch.withJoint(joint -> Restacking.of(joint, elements, place));
   }
 
   /** The stack without an element; the one that takes its place is selected. */
@@ -71,7 +73,7 @@ public final class Stacking {
     Part then =
         elements.isEmpty() ? Part.JOINT : Part.element(Math.min(index, elements.size() - 1));
     String name = "Delete " + Names.of(sketch.joint(), Part.element(index));
-    return new Change(name, restacked(sketch, elements), then);
+    return new Change(name, restacked(sketch, elements, i -> i > index ? i - 1 : i), then);
   }
 
   /** An element taken out and put in again at another place. */
@@ -79,7 +81,16 @@ public final class Stacking {
     List<Element> elements = new ArrayList<>(sketch.joint().elements());
     elements.add(to, elements.remove(from));
     String name = "Move " + Names.of(sketch.joint(), Part.element(from));
-    return new Change(name, restacked(sketch, elements), Part.element(to));
+    return new Change(name, restacked(sketch, elements, i -> place(i, from, to)), Part.element(to));
+  }
+
+  /** Where an element lies after one has gone from a place to another. */
+  private static int place(int index, int from, int to) {
+    if (index == from) {
+      return to;
+    }
+    int without = index > from ? index - 1 : index;
+    return without >= to ? without + 1 : without;
   }
 
   /** Whether an element can go one place towards the head (−1) or the nut (+1). */

@@ -2,6 +2,7 @@ package clampwright.figure;
 
 import clampwright.joint.Element;
 import clampwright.joint.Feature;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Outline;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
@@ -21,8 +22,10 @@ final class EdgeDistances {
   private final Drawing drawing;
   private final StackLayout layout;
   private final Sketch sketch;
+  private final LoadCase load;
 
-  EdgeDistances(Drawing drawing, StackLayout layout, Sketch sketch) {
+  EdgeDistances(Drawing drawing, StackLayout layout, Sketch sketch, LoadCase load) {
+    this.load = load;
     this.drawing = drawing;
     this.layout = layout;
     this.sketch = sketch;
@@ -30,7 +33,7 @@ final class EdgeDistances {
 
   void draw() {
     side(-1, 5);
-    side(1, sketch.joint().load().axial() == 0 ? 5 : 14);
+    side(1, load.axialMax() == 0 ? 5 : 14);
   }
 
   /** −1 left, 1 right; the first row so far below the stack [sheet mm]. */

@@ -18,13 +18,21 @@ public final class MethodSpreadFigure {
   /** A dot to place. */
   private record Dot(StiffnessMethod method, double loadFactor) {}
 
-  /** Draws the methods that apply; the chosen one filled. */
+  /**
+   * Draws the methods that apply; the chosen one filled.
+   *
+   * @param introduction load-introduction factor n of the load case shown [–]
+   */
   public static Figure of(
-      MemberStiffness members, StiffnessMethod chosen, double width, double height) {
+      MemberStiffness members,
+      StiffnessMethod chosen,
+      double introduction,
+      double width,
+      double height) {
     List<Dot> dots = new ArrayList<>();
     for (StiffnessMethod method : StiffnessMethod.values()) {
       if (members.get(method) instanceof MemberStiffness.Value value) {
-        dots.add(new Dot(method, value.loadFactor()));
+        dots.add(new Dot(method, value.loadFactor(introduction)));
       }
     }
     dots.sort(Comparator.comparingDouble(Dot::loadFactor));

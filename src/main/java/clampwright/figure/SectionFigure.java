@@ -1,5 +1,6 @@
 package clampwright.figure;
 
+import clampwright.joint.LoadCase;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.Assessment;
@@ -25,9 +26,10 @@ public final class SectionFigure {
    * @param selected part, JOINT when nothing is
    * @param hot what lies under the pointer or is being dragged
    * @param interactive whether grips are drawn
+   * @param loadCase index of the load case whose arrows are drawn
    */
-  public record Options(Part selected, Optional<Tag> hot, boolean interactive) {
-    public static final Options PLAIN = new Options(Part.JOINT, Optional.empty(), false);
+  public record Options(Part selected, Optional<Tag> hot, boolean interactive, int loadCase) {
+    public static final Options PLAIN = new Options(Part.JOINT, Optional.empty(), false, 0);
   }
 
   /** Draws a sketch on a sheet. An unsolved joint shows its parts and the reasons, no cones. */
@@ -53,8 +55,8 @@ public final class SectionFigure {
       new CallOuts(drawing, layout, solved, sketch.units()).draw();
     }
     new Dimensions(drawing, layout, sketch).draw();
-    new EdgeDistances(drawing, layout, sketch).draw();
-    load(drawing, layout, sketch);
+    new EdgeDistances(drawing, layout, sketch, load(sketch, options)).draw();
+    load(drawing, layout, sketch, options);
     captions(drawing);
     if (count == 0) {
       beginning(drawing, layout);
@@ -87,8 +89,12 @@ public final class SectionFigure {
   }
 
   /** Arrows at head and nut that pull the joint apart, or push it together. */
-  private static void load(Drawing drawing, StackLayout layout, Sketch sketch) {
-    double axial = sketch.joint().load().axial();
+  private static LoadCase load(Sketch sketch, Options options) {
+    return sketch.joint().service().loads().get(options.loadCase());
+  }
+
+  private static void load(Drawing drawing, StackLayout layout, Sketch sketch, Options options) {
+    double axial = load(sketch, options).axialMax();
     if (axial == 0 || layout.stack() == 0) {
       return;
     }

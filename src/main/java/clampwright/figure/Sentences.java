@@ -69,6 +69,8 @@ public final class Sentences {
               + second(reason, units)
               + ".";
       case TAPPED_WASHER -> "A tapped thread needs a layer at the end, not a washer.";
+      case NO_PROOF_STRENGTH ->
+          "The preload is a share of the proof load, but this strength class has no proof strength.";
       case METHOD_NOT_APPLICABLE ->
           "The chosen stiffness method does not apply: it "
               + reason.why().orElseThrow().text()
@@ -96,6 +98,11 @@ public final class Sentences {
       case SHANK_LONGER_THAN_GRIP -> "The plain shank reaches past the grip; counted up to it.";
       case SHANK_WIDER_THAN_HOLE -> "The shank is wider than the hole it passes.";
       case PARTED -> "The axial load parts the joint; the bolt alone carries it.";
+      case SETTLING_CHARGED_TWICE ->
+          "Embedment and relaxation are both given: settling is charged twice.";
+      case LOOSE -> "The least preload is used up by losses and temperature: the bolt is loose.";
+      case EXPANSION_UNKNOWN ->
+          "A part has no coefficient of expansion: temperature cases are not counted.";
     };
   }
 

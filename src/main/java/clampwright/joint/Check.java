@@ -31,6 +31,14 @@ final class Check {
     return value;
   }
 
+  /** Absolute zero is −273.15 °C. */
+  static double temperature(String what, double celsius) {
+    if (!(celsius >= -273.15) || Double.isInfinite(celsius)) {
+      throw refused(what, "°C", celsius, "must not be below absolute zero, −273.15 °C");
+    }
+    return celsius;
+  }
+
   static double between(String what, double low, double value, double high) {
     if (!(value >= low && value <= high)) {
       throw refused(what, "", value, "must lie between " + text(low) + " and " + text(high));

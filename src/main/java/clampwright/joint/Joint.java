@@ -12,8 +12,9 @@ import java.util.Objects;
  * @param headWasherRule for a washer that touches the head
  * @param nutWasherRule for a washer that touches the nut
  * @param method angle rule, stiffness method, bolt ends
- * @param preload of the bolt
- * @param load outside load per bolt
+ * @param tightening preload and what is lost of it
+ * @param service loads and temperatures
+ * @param criteria what it is judged by
  */
 public record Joint(
     Fastener fastener,
@@ -21,8 +22,9 @@ public record Joint(
     WasherRule headWasherRule,
     WasherRule nutWasherRule,
     Method method,
-    Preload preload,
-    Load load) {
+    Tightening tightening,
+    Service service,
+    Criteria criteria) {
 
   public Joint {
     Objects.requireNonNull(fastener, "fastener");
@@ -30,8 +32,9 @@ public record Joint(
     Objects.requireNonNull(headWasherRule, "headWasherRule");
     Objects.requireNonNull(nutWasherRule, "nutWasherRule");
     Objects.requireNonNull(method, "method");
-    Objects.requireNonNull(preload, "preload");
-    Objects.requireNonNull(load, "load");
+    Objects.requireNonNull(tightening, "tightening");
+    Objects.requireNonNull(service, "service");
+    Objects.requireNonNull(criteria, "criteria");
   }
 
   /** Thickness of the whole stack [mm]; 0 for an empty one. */
@@ -49,11 +52,13 @@ public record Joint(
   }
 
   public Joint withFastener(Fastener fastener) {
-    return new Joint(fastener, elements, headWasherRule, nutWasherRule, method, preload, load);
+    return new Joint(
+        fastener, elements, headWasherRule, nutWasherRule, method, tightening, service, criteria);
   }
 
   public Joint withElements(List<Element> elements) {
-    return new Joint(fastener, elements, headWasherRule, nutWasherRule, method, preload, load);
+    return new Joint(
+        fastener, elements, headWasherRule, nutWasherRule, method, tightening, service, criteria);
   }
 
   /** The joint with one element replaced. */
@@ -64,22 +69,32 @@ public record Joint(
   }
 
   public Joint withHeadWasherRule(WasherRule rule) {
-    return new Joint(fastener, elements, rule, nutWasherRule, method, preload, load);
+    return new Joint(
+        fastener, elements, rule, nutWasherRule, method, tightening, service, criteria);
   }
 
   public Joint withNutWasherRule(WasherRule rule) {
-    return new Joint(fastener, elements, headWasherRule, rule, method, preload, load);
+    return new Joint(
+        fastener, elements, headWasherRule, rule, method, tightening, service, criteria);
   }
 
   public Joint withMethod(Method method) {
-    return new Joint(fastener, elements, headWasherRule, nutWasherRule, method, preload, load);
+    return new Joint(
+        fastener, elements, headWasherRule, nutWasherRule, method, tightening, service, criteria);
   }
 
-  public Joint withPreload(Preload preload) {
-    return new Joint(fastener, elements, headWasherRule, nutWasherRule, method, preload, load);
+  public Joint withTightening(Tightening tightening) {
+    return new Joint(
+        fastener, elements, headWasherRule, nutWasherRule, method, tightening, service, criteria);
   }
 
-  public Joint withLoad(Load load) {
-    return new Joint(fastener, elements, headWasherRule, nutWasherRule, method, preload, load);
+  public Joint withService(Service service) {
+    return new Joint(
+        fastener, elements, headWasherRule, nutWasherRule, method, tightening, service, criteria);
+  }
+
+  public Joint withCriteria(Criteria criteria) {
+    return new Joint(
+        fastener, elements, headWasherRule, nutWasherRule, method, tightening, service, criteria);
   }
 }

@@ -25,9 +25,10 @@ public sealed interface Assessment {
    *
    * @param zone the pressure zone at the angle in force
    * @param elements what each element of the stack comes to, in stack order
-   * @param members member stiffness by every method, with the load factor each gives
+   * @param members member stiffness by every method
    * @param bolt the bolt as springs in series
-   * @param sharing how preload and outside load share out, by the chosen method
+   * @param preload from tightening to service
+   * @param cases how preload and outside load share out by the chosen method, one per load case
    * @param notices assumptions that need saying for this joint
    */
   record Solved(
@@ -35,12 +36,28 @@ public sealed interface Assessment {
       List<ElementFinding> elements,
       MemberStiffness members,
       BoltStiffness bolt,
-      LoadSharing sharing,
+      Preload preload,
+      List<LoadSharing> cases,
       List<Notice> notices)
       implements Assessment {
     public Solved {
       elements = List.copyOf(elements);
+      cases = List.copyOf(cases);
       notices = List.copyOf(notices);
+    }
+
+    /** The first load case, which the headline readouts follow. */
+    public LoadSharing sharing() {
+      return cases.get(0);
+    }
+
+    /**
+     * Stiffness with which bolt and members together resist settling, k_b·k_m/(k_b + k_m) [N/mm].
+     */
+    public double series() {
+      double bolt = this.bolt.stiffness();
+      double members = sharing().memberStiffness();
+      return bolt * members / (bolt + members);
     }
   }
 

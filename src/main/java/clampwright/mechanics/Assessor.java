@@ -1,13 +1,16 @@
 package clampwright.mechanics;
 
 import clampwright.joint.Joint;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Part;
+import clampwright.joint.Service;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.Assessment.Unsolved;
 import clampwright.mechanics.Reason.Cause;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** Puts the parts of the calculation together. */
 final class Assessor {
@@ -52,16 +55,51 @@ final class Assessor {
           List.of(new Reason(Part.JOINT, Cause.METHOD_NOT_APPLICABLE, List.of(), why)));
     }
     MemberStiffness.Value chosen = (MemberStiffness.Value) result;
-    LoadSharing sharing =
-        new LoadSharing(
-            chosen.stiffness(), chosen.loadFactor(), joint.preload().force(), joint.load().axial());
+    OptionalDouble nominal = AssemblyPreload.of(joint, joint.tightening().target());
+    if (nominal.isEmpty()) {
+      return new Unsolved(List.of(Reason.of(Part.HEAD, Cause.NO_PROOF_STRENGTH)));
+    }
+    Preload preload = Preload.of(joint, nominal.getAsDouble(), findings);
+    List<LoadSharing> cases = new ArrayList<>();
+    for (LoadCase load : joint.service().loads()) {
+      cases.add(shared(joint, load, chosen, bolt.stiffness(), preload, findings));
+    }
     return new Solved(
         described(angles, faces, zone),
         findings,
         members,
         bolt,
-        sharing,
-        Notices.of(joint, findings, bolt, sharing));
+        preload,
+        cases,
+        Notices.of(joint, findings, bolt, preload, cases));
+  }
+
+  private static LoadSharing shared(
+      Joint joint,
+      LoadCase load,
+      MemberStiffness.Value chosen,
+      double bolt,
+      Preload preload,
+      List<ElementFinding> findings) {
+    double introduction = IntroductionFactor.of(load.introduction(), findings);
+    double series = bolt * chosen.stiffness() / (bolt + chosen.stiffness());
+    return new LoadSharing(
+        chosen.stiffness(),
+        introduction,
+        chosen.loadFactor(introduction),
+        preload.inService(series, state(joint.service(), load, preload)),
+        load.axialMin(),
+        load.axialMax());
+  }
+
+  /** The temperature case that a load meets; any where it names none, or one that is gone. */
+  static int state(Service service, LoadCase load, Preload preload) {
+    for (int i = 0; i < preload.mismatches().size(); i++) {
+      if (load.temperature().equals(Optional.of(service.temperatures().get(i).name()))) {
+        return i;
+      }
+    }
+    return Preload.ANY;
   }
 
   private static List<Reason> noBearing(PressureZone zone) {

@@ -19,10 +19,16 @@ public record MemberStiffness(Map<StiffnessMethod, Result> byMethod) {
    * A stiffness.
    *
    * @param stiffness k_m [N/mm]
-   * @param loadFactor Φ = n·k_b/(k_b + k_m) [–]
+   * @param share the bolt's share k_b/(k_b + k_m) [–], the load factor for n = 1
    * @param halfAngle the angle it was computed at [rad]; 0 where the method has none
    */
-  public record Value(double stiffness, double loadFactor, double halfAngle) implements Result {}
+  public record Value(double stiffness, double share, double halfAngle) implements Result {
+
+    /** Φ = n·k_b/(k_b + k_m) [–]. */
+    public double loadFactor(double introduction) {
+      return introduction * share;
+    }
+  }
 
   /**
    * The method does not apply to this joint.

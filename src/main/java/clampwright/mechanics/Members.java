@@ -117,6 +117,6 @@ final class Members {
   private Value value(double give, double angle) {
     double stiffness = 1 / give;
     double share = boltStiffness / (boltStiffness + stiffness);
-    return new Value(stiffness, joint.load().introduction() * share, angle);
+    return new Value(stiffness, share, angle);
   }
 }

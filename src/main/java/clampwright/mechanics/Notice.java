@@ -21,6 +21,12 @@ public record Notice(Part part, Kind kind) {
     /** The shank is wider than a hole it passes. */
     SHANK_WIDER_THAN_HOLE,
     /** The outside load parts the joint. */
-    PARTED
+    PARTED,
+    /** Embedment and relaxation are both given, which charges settling twice. */
+    SETTLING_CHARGED_TWICE,
+    /** Losses and temperature use up the whole preload. */
+    LOOSE,
+    /** A part has no coefficient of expansion, so temperature cases cannot be counted. */
+    EXPANSION_UNKNOWN
   }
 }

@@ -15,7 +15,11 @@ final class Notices {
   private Notices() {}
 
   static List<Notice> of(
-      Joint joint, List<ElementFinding> findings, BoltStiffness bolt, LoadSharing sharing) {
+      Joint joint,
+      List<ElementFinding> findings,
+      BoltStiffness bolt,
+      Preload preload,
+      List<LoadSharing> cases) {
     List<Notice> notices = new ArrayList<>();
     for (int i = 0; i < findings.size(); i++) {
       addElement(notices, joint.fastener(), findings, bolt, i);
@@ -26,10 +30,29 @@ final class Notices {
     if (bolt.shankLength() > bolt.grip() * (1 + ROUNDING)) {
       notices.add(new Notice(Part.SHANK, Kind.SHANK_LONGER_THAN_GRIP));
     }
-    if (sharing.axial() > 0 && sharing.axial() >= sharing.partingLoad()) {
+    if (cases.stream().anyMatch(Notices::isParted)) {
       notices.add(new Notice(Part.LOAD, Kind.PARTED));
     }
+    addPreload(notices, joint, preload, cases);
     return notices;
+  }
+
+  private static boolean isParted(LoadSharing sharing) {
+    return sharing.axialMax() > 0 && sharing.axialMax() >= sharing.partingLoad();
+  }
+
+  private static void addPreload(
+      List<Notice> notices, Joint joint, Preload preload, List<LoadSharing> cases) {
+    if (preload.embedment() > 0 && joint.tightening().relaxation() > 0) {
+      notices.add(new Notice(Part.SHANK, Kind.SETTLING_CHARGED_TWICE));
+    }
+    boolean loose = cases.stream().anyMatch(sharing -> sharing.preload().min() <= 0);
+    if (preload.nominal() > 0 && loose) {
+      notices.add(new Notice(Part.SHANK, Kind.LOOSE));
+    }
+    if (!joint.service().temperatures().isEmpty() && preload.mismatches().isEmpty()) {
+      notices.add(new Notice(Part.JOINT, Kind.EXPANSION_UNKNOWN));
+    }
   }
 
   private static void addElement(

@@ -41,6 +41,8 @@ public record Reason(
     BORE_TOO_WIDE,
     /** A tapped thread needs a layer, not a washer, at the end []. */
     TAPPED_WASHER,
+    /** The preload is a share of the proof load, and the strength class has none []. */
+    NO_PROOF_STRENGTH,
     /** The method chosen for the headline does not apply [], see {@link Reason#why}. */
     METHOD_NOT_APPLICABLE
   }

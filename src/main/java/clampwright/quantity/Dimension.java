@@ -28,6 +28,21 @@ public enum Dimension {
   ANGLE(
       List.of(Unit.of("°", Unit.DEGREE), Unit.of("deg", Unit.DEGREE), Unit.of("rad", "1")),
       List.of(Unit.of("°", Unit.DEGREE))),
+  TORQUE(
+      List.of(Unit.of("N·m", "1000"), Unit.of("N·mm", "1")),
+      List.of(
+          Unit.of("lbf·ft", "12").times(Unit.POUND).times(Unit.INCH),
+          Unit.of("lbf·in", "1").times(Unit.POUND).times(Unit.INCH))),
+  /** Small lengths of settling. */
+  SETTLING(
+      List.of(Unit.of("µm", "0.001"), Unit.of("mm", "1")),
+      List.of(Unit.of("mil", "0.001").times(Unit.INCH), Unit.of("in", Unit.INCH))),
+  TEMPERATURE(List.of(Unit.of("°C", "1")), List.of(Unit.FAHRENHEIT)),
+  TEMPERATURE_CHANGE(List.of(Unit.of("K", "1")), List.of(Unit.of("°F", "5").per("9"))),
+  /** A share that is read in per cent. */
+  SHARE(List.of(Unit.of("%", "0.01")), List.of(Unit.of("%", "0.01"))),
+  /** A whole number, such as of cycles or faces. */
+  COUNT(List.of(Unit.of("", "1")), List.of(Unit.of("", "1"))),
   RATIO(List.of(Unit.of("", "1"), Unit.of("%", "0.01")), List.of(Unit.of("", "1")));
 
   private final List<Unit> metric;

@@ -21,7 +21,8 @@ public final class Quantities {
 
   /** Value in the shown unit. */
   public static double shown(Dimension dimension, UnitSystem system, double value) {
-    return value / dimension.shown(system).size();
+    Unit unit = dimension.shown(system);
+    return unit.offset().signum() == 0 ? value / unit.size() : unit.shown(value).doubleValue();
   }
 
   /**
@@ -30,7 +31,7 @@ public final class Quantities {
    */
   public static double inside(Dimension dimension, UnitSystem system, double shown) {
     Unit unit = dimension.shown(system);
-    return Double.isFinite(shown) ? unit.inside(BigDecimal.valueOf(shown)) : shown * unit.size();
+    return Double.isFinite(shown) ? unit.inside(BigDecimal.valueOf(shown)) : shown;
   }
 
   /**
@@ -97,6 +98,8 @@ public final class Quantities {
       case LENGTH -> metric ? 2 : 3;
       case AREA -> metric ? 1 : 4;
       case ANGLE -> 1;
+      case TEMPERATURE, TEMPERATURE_CHANGE -> 0;
+      case SHARE -> size < 9.95 ? 1 : 0;
       case FORCE -> metric ? significant(size) : 0;
       default -> significant(size);
     };

@@ -39,12 +39,13 @@ final class TypedNumber {
     if (form.group("under") != null && new BigDecimal(form.group("under")).signum() == 0) {
       return new Reading.Wrong("'" + trimmed + "' divides by 0; such as 1/4.");
     }
-    double value = known.get().inside(magnitude(form));
+    BigDecimal magnitude = magnitude(form);
+    double value = known.get().inside(negative(form) ? magnitude.negate() : magnitude);
     if (!Double.isFinite(value)) {
       return new Reading.Wrong(
           "'" + trimmed + "' is too large; such as " + example(dimension, system) + ".");
     }
-    return new Reading.Value(negative(form) ? -value : value);
+    return new Reading.Value(value);
   }
 
   private static boolean negative(Matcher form) {
@@ -91,7 +92,9 @@ final class TypedNumber {
         .replace("um", "µm")
         .replace("''", "\"")
         .replace("\u2033", "\"")
-        .replace("inch", "in");
+        .replace("inch", "in")
+        .replace("·", "")
+        .replace(" ", "");
   }
 
   private static Reading notUnderstood(String text, Dimension dimension, UnitSystem system) {
@@ -105,6 +108,9 @@ final class TypedNumber {
       case LENGTH -> metric ? "6.5 or 1/4 in" : "1/4 or 6.5 mm";
       case FORCE -> metric ? "12.5 or 2800 lbf" : "2800 or 12.5 kN";
       case ANGLE -> "30";
+      case TORQUE -> metric ? "48 or 35 lbf·ft" : "35 or 48 N·m";
+      case TEMPERATURE -> metric ? "80 or 176 °F" : "176 or 80 °C";
+      case SHARE -> "25";
       default -> "2.5";
     };
   }

@@ -10,8 +10,9 @@ import java.math.MathContext;
  * @param symbol as shown and typed
  * @param exact how much of the inside unit it is
  * @param size the same, for display
+ * @param offset what 0 of this unit is in the inside unit; 0 but for degrees Fahrenheit
  */
-record Unit(String symbol, BigDecimal exact, double size) {
+record Unit(String symbol, BigDecimal exact, double size, BigDecimal offset) {
   /** Inch [mm] and pound-force [N], exact by definition (NIST SP 811, appendix B). */
   static final String INCH = "25.4";
 
@@ -22,8 +23,16 @@ record Unit(String symbol, BigDecimal exact, double size) {
 
   private static final MathContext FIGURES = new MathContext(40);
 
+  /** °F as °C, (F − 32)·5/9. */
+  static final Unit FAHRENHEIT =
+      new Unit("°F", ninths("5"), ninths("5").doubleValue(), ninths("-160"));
+
   private Unit(String symbol, BigDecimal exact) {
-    this(symbol, exact, exact.doubleValue());
+    this(symbol, exact, exact.doubleValue(), BigDecimal.ZERO);
+  }
+
+  private static BigDecimal ninths(String count) {
+    return new BigDecimal(count).divide(new BigDecimal(9), FIGURES);
   }
 
   static Unit of(String symbol, String size) {
@@ -45,11 +54,11 @@ record Unit(String symbol, BigDecimal exact, double size) {
 
   /** A number of this unit in the unit inside the program: the double nearest to it. */
   double inside(BigDecimal number) {
-    return number.multiply(exact, FIGURES).doubleValue();
+    return number.multiply(exact, FIGURES).add(offset).doubleValue();
   }
 
   /** A finite value inside the program in this unit. */
   BigDecimal shown(double value) {
-    return new BigDecimal(value).divide(exact, FIGURES);
+    return new BigDecimal(value).subtract(offset).divide(exact, FIGURES);
   }
 }

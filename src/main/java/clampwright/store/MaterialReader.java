@@ -29,6 +29,15 @@ final class MaterialReader {
             "expansion",
             "expansion",
             value -> new Material("", family, 1, NONE, OptionalDouble.of(value)));
-    return material.build(() -> new Material(name, family, modulus, poisson, expansion));
+    OptionalDouble tensile =
+        material.optional(
+            "tensile", "tensile strength", value -> SOUND.withTensile(OptionalDouble.of(value)));
+    OptionalDouble pressure =
+        material.optional(
+            "pressureLimit",
+            "pressure limit",
+            value -> SOUND.withPressureLimit(OptionalDouble.of(value)));
+    return material.build(
+        () -> new Material(name, family, modulus, poisson, expansion, tensile, pressure));
   }
 }

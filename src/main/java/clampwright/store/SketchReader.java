@@ -1,16 +1,18 @@
 package clampwright.store;
 
 import clampwright.joint.AngleRule;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
 import clampwright.joint.Method;
-import clampwright.joint.Preload;
+import clampwright.joint.Service;
 import clampwright.joint.Sketch;
 import clampwright.joint.StiffnessMethod;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import clampwright.quantity.UnitSystem;
+import com.google.gson.JsonArray;
 import com.google.gson.JsonObject;
 import java.util.List;
 import java.util.Optional;
@@ -42,9 +44,13 @@ final class SketchReader {
         sketch.has("method")
             ? sketch.object("method", "method", "method", SketchReader::method)
             : Optional.of(Method.USUAL);
-    Optional<Preload> preload =
-        sketch.object("preload", "preload", "preload", SketchReader::preload);
-    Optional<Load> load = sketch.object("load", "load", "load", SketchReader::load);
+    Optional<Tightening> tightening =
+        sketch.object("tightening", "tightening", "tightening", TighteningReader::read);
+    Optional<Service> service = ServiceReader.read(sketch, stackSize(json), notes);
+    Optional<Criteria> criteria =
+        sketch.has("criteria")
+            ? sketch.object("criteria", "criteria", "criteria", CriteriaReader::read)
+            : Optional.of(Criteria.USUAL);
     return sketch.build(
         () ->
             new Sketch(
@@ -55,8 +61,9 @@ final class SketchReader {
                     rules.orElseThrow().head(),
                     rules.orElseThrow().nut(),
                     method.orElseThrow(),
-                    preload.orElseThrow(),
-                    load.orElseThrow()),
+                    tightening.orElseThrow(),
+                    service.orElseThrow(),
+                    criteria.orElseThrow()),
                 units));
   }
 
@@ -94,15 +101,7 @@ final class SketchReader {
     return angle.build(() -> new AngleRule.Typed(head, nut));
   }
 
-  private static Optional<Preload> preload(JsonObjectReader preload) {
-    double force = preload.number("force", "force", Preload::new);
-    return preload.build(() -> new Preload(force));
-  }
-
-  private static Optional<Load> load(JsonObjectReader load) {
-    double axial = load.number("axial", "axial load", 0, value -> new Load(value, 1));
-    double introduction =
-        load.number("introduction", "load-introduction factor", 1, value -> new Load(0, value));
-    return load.build(() -> new Load(axial, introduction));
+  private static int stackSize(JsonObject json) {
+    return json.get("stack") instanceof JsonArray stack ? stack.size() : 0;
   }
 }

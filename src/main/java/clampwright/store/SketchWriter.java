@@ -42,13 +42,10 @@ final class SketchWriter {
     rules.addProperty("nut", Words.of(Words.WASHER_RULES, joint.nutWasherRule()));
     root.add("washerRule", rules);
     root.add("method", method(joint.method()));
-    JsonObject preload = new JsonObject();
-    number(preload, "force", joint.preload().force());
-    root.add("preload", preload);
-    JsonObject load = new JsonObject();
-    number(load, "axial", joint.load().axial());
-    number(load, "introduction", joint.load().introduction());
-    root.add("load", load);
+    root.add("tightening", TighteningWriter.json(joint.tightening()));
+    root.add("temperatures", ServiceWriter.temperatures(joint.service()));
+    root.add("loads", ServiceWriter.loads(joint.service()));
+    root.add("criteria", CriteriaWriter.json(joint.criteria()));
     return encodable(GSON.toJson(root)) + "\n";
   }
 
@@ -117,6 +114,8 @@ final class SketchWriter {
     number(json, "modulus", material.modulus());
     optional(json, "poisson", material.poisson());
     optional(json, "expansion", material.expansion());
+    optional(json, "tensile", material.tensile());
+    optional(json, "pressureLimit", material.pressureLimit());
     return json;
   }
 
@@ -168,12 +167,12 @@ final class SketchWriter {
     return json;
   }
 
-  private static void optional(JsonObject json, String key, OptionalDouble value) {
+  static void optional(JsonObject json, String key, OptionalDouble value) {
     value.ifPresent(number -> number(json, key, number));
   }
 
   /** The shortest number that reads back as the same double, without a needless ".0". */
-  private static void number(JsonObject json, String key, double value) {
+  static void number(JsonObject json, String key, double value) {
     boolean whole = value == Math.rint(value) && Math.abs(value) < 1e15;
     boolean negativeZero = value == 0 && 1 / value < 0;
     if (whole && !negativeZero) {

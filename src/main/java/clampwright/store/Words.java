@@ -1,7 +1,9 @@
 package clampwright.store;
 
 import clampwright.joint.AngleRule;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
+import clampwright.joint.Embedment;
 import clampwright.joint.Head;
 import clampwright.joint.Material;
 import clampwright.joint.Method.ThreadArea;
@@ -58,6 +60,19 @@ final class Words {
               AngleRule.FIXED_30,
               new AngleRule.Typed(45, 45),
               AngleRule.VDI_2230));
+
+  /** What can be given at tightening. */
+  enum Given {
+    FORCE,
+    PROOF_FRACTION,
+    NUT_FACTOR_TORQUE,
+    FRICTION_TORQUE
+  }
+
+  static final Map<String, Given> TARGETS = camel(Given.values());
+  static final Map<String, Embedment.Roughness> ROUGHNESSES = camel(Embedment.Roughness.values());
+  static final Map<String, Criteria.Basis> BASES = camel(Criteria.Basis.values());
+  static final Map<String, Criteria.Fatigue> FATIGUES = camel(Criteria.Fatigue.values());
 
   private Words() {}
 

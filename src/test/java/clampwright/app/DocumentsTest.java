@@ -5,8 +5,8 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import clampwright.edit.SketchModel;
-import clampwright.joint.Preload;
 import clampwright.joint.Sketch;
+import clampwright.joint.Tightening;
 import clampwright.store.Samples;
 import clampwright.store.SketchFile;
 import clampwright.store.Stored;
@@ -61,7 +61,8 @@ class DocumentsTest implements Documents.Desk {
 
   private Sketch edit() {
     model.change(
-        "Preload", sketch -> sketch.withJoint(joint -> joint.withPreload(new Preload(31_000))));
+        "Preload",
+        sketch -> sketch.withJoint(joint -> joint.withTightening(Tightening.force(31_000))));
     return model.sketch();
   }
 

@@ -55,8 +55,8 @@ class FoundCommandTest {
   void aNewerFormatIsOneLineAndExit2() throws IOException {
     checkRefused(
         2,
-        file("\"format\": 1", "\"format\": 3"),
-        "This sketch was written by a newer Clampwright (format 3); this one reads up to format 1;"
+        file("\"format\": 2", "\"format\": 3"),
+        "This sketch was written by a newer Clampwright (format 3); this one reads up to format 2;"
             + " nothing was changed.");
   }
 

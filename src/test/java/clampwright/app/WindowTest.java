@@ -8,6 +8,7 @@ import clampwright.edit.SketchModel;
 import clampwright.joint.Joint;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
+import clampwright.joint.Target;
 import clampwright.quantity.UnitSystem;
 import clampwright.store.SketchFile;
 import clampwright.store.Stored;
@@ -102,7 +103,7 @@ class WindowTest {
   }
 
   private double newtons() {
-    return model.sketch().joint().preload().force();
+    return ((Target.Force) model.sketch().joint().tightening().target()).force();
   }
 
   @Test
@@ -135,7 +136,7 @@ class WindowTest {
     enter("#axial-load", "8");
 
     press(KeyCode.SHORTCUT, KeyCode.Z);
-    assertEquals(6_000, model.sketch().joint().load().axial());
+    assertEquals(6_000, model.sketch().joint().service().loads().get(0).axialMax());
     assertEquals("6", ((TextField) robot.lookup("#axial-load").query()).getText());
 
     press(KeyCode.SHORTCUT, KeyCode.Z);
@@ -283,7 +284,7 @@ class WindowTest {
     press(KeyCode.SHORTCUT, KeyCode.S);
 
     Stored.Opened stored = (Stored.Opened) SketchFile.read(file);
-    assertEquals(31_500, stored.sketch().joint().preload().force());
+    assertEquals(31_500, ((Target.Force) stored.sketch().joint().tightening().target()).force());
     assertFalse(model.unsavedProperty().get());
   }
 

@@ -1,18 +1,20 @@
 package clampwright.edit;
 
 import clampwright.joint.Anchor;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Head;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
 import clampwright.joint.Outline;
-import clampwright.joint.Preload;
 import clampwright.joint.ScrewThread;
+import clampwright.joint.Service;
 import clampwright.joint.Sketch;
 import clampwright.joint.Strength;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import clampwright.quantity.UnitSystem;
 import java.util.List;
@@ -63,8 +65,9 @@ final class Sketches {
             WasherRule.AUTOMATIC,
             WasherRule.AUTOMATIC,
             Method.USUAL,
-            new Preload(30_000),
-            new Load(10_000, 1));
+            Tightening.force(30_000),
+            Service.of(LoadCase.steady("Working load", 10_000, 1)),
+            Criteria.USUAL);
     return new Sketch("Pump cover", joint, UnitSystem.METRIC);
   }
 

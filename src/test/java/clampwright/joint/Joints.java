@@ -152,16 +152,15 @@ public final class Joints {
   /** Any joint, of up to six elements. */
   public static Arbitrary<Joint> any() {
     Arbitrary<WasherRule> rules = Arbitraries.of(WasherRule.class);
-    Arbitrary<Load> loads =
-        Combinators.combine(finite(), share().map(share -> 1 - share)).as(Load::new);
     return Combinators.combine(
             fasteners(),
             elements().list().ofMaxSize(6),
             rules,
             rules,
             methods(),
-            notNegative().map(Preload::new),
-            loads)
+            Services.tightenings(),
+            Services.services(),
+            Services.criteria())
         .as(Joint::new);
   }
 
@@ -188,8 +187,9 @@ public final class Joints {
                             rule,
                             rule,
                             Method.USUAL.withAngle(angle).withStiffness(method),
-                            new Preload(force),
-                            new Load(axial, 1))));
+                            Tightening.force(force),
+                            Service.of(LoadCase.steady("Working load", axial, 1)),
+                            Criteria.USUAL)));
   }
 
   private static Fastener fittingBolt(double d, double headFace, double nutFace, Anchor anchor) {

@@ -26,19 +26,21 @@ class RefusalTest {
     checkRefused("thickness −2 mm must be above 0", () -> layer(-2));
     checkRefused("thickness 0 mm must be above 0", () -> layer(0));
     checkRefused("thickness −0.25 mm must be above 0", () -> layer(-0.25));
-    checkRefused("preload −1000 N must be 0 or more", () -> new Preload(-1000));
+    checkRefused("preload −1000 N must be 0 or more", () -> new Target.Force(-1000));
   }
 
   @Test
   void whatIsNoFiniteNumberIsRefused() {
     checkRefused("thickness NaN mm must be above 0", () -> layer(Double.NaN));
     checkRefused("thickness Infinity mm must be above 0", () -> layer(Double.POSITIVE_INFINITY));
-    checkRefused("axial load NaN N must be a finite number", () -> new Load(Double.NaN, 1));
+    checkRefused(
+        "least axial load NaN N must be a finite number", () -> LoadCase.steady("", Double.NaN, 1));
   }
 
   @Test
   void aValueOutsideItsRangeIsNamedWithTheRange() {
-    checkRefused("load-introduction factor 1.5 must lie between 0 and 1", () -> new Load(0, 1.5));
+    checkRefused(
+        "load-introduction factor 1.5 must lie between 0 and 1", () -> LoadCase.steady("", 0, 1.5));
     checkRefused(
         "pitch 6 mm must be at most half the thread diameter",
         () -> new ScrewThread("M10", ScrewThread.Form.METRIC, 10, 6));

@@ -121,7 +121,7 @@ class StackPropertiesTest {
       @ForAll @DoubleRange(min = 0, max = 1e6) double preload,
       @ForAll @DoubleRange(min = -1e6, max = 1e6) double axial,
       @ForAll @DoubleRange(min = 0, max = 0.99) double loadFactor) {
-    LoadSharing sharing = new LoadSharing(1e6, loadFactor, preload, axial);
+    LoadSharing sharing = new LoadSharing(1e6, 1, loadFactor, Band.exact(preload), axial, axial);
     assertEquals(sharing.boltLoad(), sharing.clampLoad() + axial, 1e-6);
     assertTrue(sharing.boltLoad() >= 0 && sharing.clampLoad() >= -1e-6);
   }

@@ -2,18 +2,20 @@ package clampwright.mechanics;
 
 import clampwright.joint.Anchor;
 import clampwright.joint.AngleRule;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Head;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
 import clampwright.joint.Outline;
-import clampwright.joint.Preload;
 import clampwright.joint.ScrewThread;
+import clampwright.joint.Service;
 import clampwright.joint.StiffnessMethod;
 import clampwright.joint.Strength;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -77,8 +79,9 @@ final class Stacks {
         WasherRule.AUTOMATIC,
         WasherRule.AUTOMATIC,
         Method.USUAL.withAngle(angle),
-        new Preload(30_000),
-        new Load(10_000, 1));
+        Tightening.force(30_000),
+        Service.of(LoadCase.steady("Working load", 10_000, 1)),
+        Criteria.USUAL);
   }
 
   static Assessment.Solved solved(Joint joint) {

@@ -145,7 +145,9 @@ class QuantityTest {
       @ForAll UnitSystem system,
       @ForAll @DoubleRange(min = -1e6, max = 1e6) double value) {
     double there = Quantities.shown(dimension, system, value);
-    assertEquals(value, Quantities.inside(dimension, system, there), 1e-15 * Math.abs(value));
+    // The zeros of °F and °C lie apart, which costs the last bits of small temperatures.
+    double size = Math.max(Math.abs(value), dimension == Dimension.TEMPERATURE ? 50 : 0);
+    assertEquals(value, Quantities.inside(dimension, system, there), 1e-15 * size);
   }
 
   @Property

@@ -8,7 +8,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Method;
 import clampwright.joint.Sketch;
 import clampwright.joint.WasherRule;
@@ -27,7 +27,7 @@ class SketchJsonTest {
     assertEquals(Method.USUAL, joint.method());
     assertEquals(WasherRule.AUTOMATIC, joint.headWasherRule());
     assertEquals(WasherRule.AUTOMATIC, joint.nutWasherRule());
-    assertEquals(new Load(5000, 1), joint.load());
+    assertEquals(List.of(LoadCase.steady("Working load", 5000, 1)), joint.service().loads());
     assertEquals(0, joint.fastener().bore());
     assertTrue(joint.fastener().length().isEmpty());
     assertEquals(16, joint.fastener().head().rim());
@@ -66,8 +66,16 @@ class SketchJsonTest {
             "washer rule: unknown key 'note' was ignored",
             "half-angle: unknown key 'note' was ignored",
             "method: unknown key 'note' was ignored",
-            "preload: unknown key 'note' was ignored",
-            "load: unknown key 'note' was ignored",
+            "tightening, target: unknown key 'note' was ignored",
+            "tightening, scatter: unknown key 'note' was ignored",
+            "tightening, embedment: unknown key 'note' was ignored",
+            "tightening: unknown key 'note' was ignored",
+            "temperatures: unknown key 'note' was ignored",
+            "load case 1, introduction: unknown key 'note' was ignored",
+            "load case 1: unknown key 'note' was ignored",
+            "factors: unknown key 'note' was ignored",
+            "tolerances: unknown key 'note' was ignored",
+            "criteria: unknown key 'note' was ignored",
             "sketch: unknown key 'note' was ignored"),
         opened(text).remarks());
   }
@@ -76,9 +84,9 @@ class SketchJsonTest {
   void aNewerFormatIsRefusedPolitely() {
     assertEquals(
         List.of(
-            "This sketch was written by a newer Clampwright (format 2); this one reads up to"
-                + " format 1; nothing was changed."),
-        problems(with("\"format\": 1", "\"format\": 2")));
+            "This sketch was written by a newer Clampwright (format 3); this one reads up to"
+                + " format 2; nothing was changed."),
+        problems(with("\"format\": 1", "\"format\": 3")));
   }
 
   /** A newer format may mean anything by its keys: only its number is looked at. */
@@ -90,7 +98,7 @@ class SketchJsonTest {
   @Test
   void theTextReadsWellAndKeepsItsOrder() {
     String text = SketchJson.of(opened(SHORTEST).sketch());
-    assertTrue(text.startsWith("{\n  \"format\": 1,\n  \"name\": \"Shortest\",\n"), text);
+    assertTrue(text.startsWith("{\n  \"format\": 2,\n  \"name\": \"Shortest\",\n"), text);
     assertTrue(text.contains("\"diameter\": 10,\n      \"pitch\": 1.5\n"), text);
     assertTrue(text.endsWith("}\n"), text);
   }

@@ -41,12 +41,12 @@ class SketchProblemsTest {
         "\"tensile\": 800 | \"tensile\": 0 | bolt strength: tensile strength 0 MPa must be above 0",
         "\"tensile\": 800 | \"tensile\": 800, \"yield\": -1 | bolt strength: yield strength −1 MPa"
             + " must be above 0",
-        "\"force\": 20000 | \"force\": -5 | preload: preload −5 N must be 0 or more",
-        "\"axial\": 5000 | \"introduction\": 2 | load: load-introduction factor 2 must lie between"
+        "\"force\": 20000 | \"force\": -5 | tightening, target: preload −5 N must be 0 or more",
+        "\"axial\": 5000 | \"introduction\": 2 | load case 1, introduction: load-introduction factor 2 must lie between"
             + " 0 and 1",
         "\"stack\": [ | \"stack\": [ 3, | layer 1: must be an object in braces, not 3",
         "\"name\": \"Shortest\" | \"name\": 4 | sketch: name must be a text, not 4",
-        "\"preload\": {\"force\": 20000}, | `` | sketch: preload is missing",
+        "\"preload\": {\"force\": 20000}, | `` | sketch: tightening is missing",
         "\"name\": \"Shortest\" | \"name\": \"\", \"units\": \"cm\" | sketch: units must be one of"
             + " mm-N, in-lbf, not \"cm\"",
         "\"name\": \"Shortest\" | \"name\": \"\", \"method\": {\"endsCounted\": 1} | method:"
@@ -79,7 +79,7 @@ class SketchProblemsTest {
             "nut: nut height −8.4 mm must be above 0",
             "layer 1 'Cover': thickness −2 mm must be above 0",
             "layer 1 'Cover': hole 0 mm must be above 0",
-            "load: axial load must be a number, not \"much\""),
+            "load case 1: axial load must be a number, not \"much\""),
         problems(text));
   }
 

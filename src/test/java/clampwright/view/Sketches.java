@@ -1,14 +1,16 @@
 package clampwright.view;
 
 import clampwright.catalog.Catalogue;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
 import clampwright.joint.Outline;
-import clampwright.joint.Preload;
+import clampwright.joint.Service;
 import clampwright.joint.Sketch;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import clampwright.quantity.UnitSystem;
 import java.util.List;
@@ -36,8 +38,9 @@ public final class Sketches {
             WasherRule.AUTOMATIC,
             WasherRule.AUTOMATIC,
             Method.USUAL,
-            new Preload(25_000),
-            new Load(6_000, 1));
+            Tightening.force(25_000),
+            Service.of(LoadCase.steady("Working load", 6_000, 1)),
+            Criteria.USUAL);
     return new Sketch("Pump cover", joint, UnitSystem.METRIC);
   }
 }

@@ -6,6 +6,7 @@ import clampwright.joint.Joint;
 import clampwright.joint.Part;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.ElementFinding;
+import clampwright.mechanics.LoadSharing;
 import clampwright.mechanics.Notice;
 import clampwright.mechanics.Zone;
 import java.util.List;
@@ -17,8 +18,13 @@ import java.util.function.Predicate;
  * @param joint as given
  * @param solved what it comes to
  * @param numbers in the reader's units
+ * @param loadCase index of the load case that is worked out
  */
-record Found(Joint joint, Solved solved, Numbers numbers) {
+record Found(Joint joint, Solved solved, Numbers numbers, int loadCase) {
+
+  LoadSharing sharing() {
+    return solved.cases().get(loadCase);
+  }
 
   Element element(int index) {
     return joint.elements().get(index);

@@ -33,11 +33,11 @@ record SharingWorking(Found found) {
         "n·k_b/(k_b + k_m)",
         "%s × %s / (%s + %s)"
             .formatted(
-                numbers.ratio(found.joint().load().introduction()),
+                numbers.ratio(found.sharing().introduction()),
                 bolt,
                 bolt,
                 numbers.stiffness(value.stiffness())),
-        numbers.result(Dimension.RATIO, value.loadFactor()),
+        numbers.result(Dimension.RATIO, value.loadFactor(found.sharing().introduction())),
         Source.SHARING);
   }
 
@@ -48,7 +48,7 @@ record SharingWorking(Found found) {
         new Step(
             "Parts at",
             "F_p/(1 − Φ), pulling loads only",
-            numbers.force(sharing.preload())
+            numbers.force(sharing.preload().min())
                 + " / (1 − "
                 + numbers.ratio(sharing.loadFactor(), 1 - sharing.loadFactor())
                 + ")",
@@ -79,13 +79,13 @@ record SharingWorking(Found found) {
   private Step boltStep() {
     Numbers numbers = found.numbers();
     LoadSharing sharing = sharing();
-    String axial = numbers.force(sharing.axial());
+    String axial = numbers.force(sharing.axialMax());
     return new Step(
         "Bolt load F_b",
         "max(F_p + Φ·F_A, F_A, 0)",
         "max(%s + %s × %s, %s, 0)"
             .formatted(
-                numbers.force(sharing.preload()),
+                numbers.force(sharing.preload().max()),
                 numbers.ratio(sharing.loadFactor()),
                 axial,
                 axial),
@@ -99,12 +99,12 @@ record SharingWorking(Found found) {
     return new Step(
         "Clamp load F_c",
         "F_b − F_A",
-        numbers.force(sharing.boltLoad()) + " − " + numbers.force(sharing.axial()),
+        numbers.force(sharing.boltLoad()) + " − " + numbers.force(sharing.axialMax()),
         numbers.forceResult(sharing.clampLoad()),
         Source.EQUILIBRIUM);
   }
 
   private LoadSharing sharing() {
-    return found.solved().sharing();
+    return found.sharing();
   }
 }

@@ -21,18 +21,23 @@ public record Working(String title, List<Step> steps) {
     steps = List.copyOf(steps);
   }
 
-  /** The working of a selected part; of the member stiffness where nothing is selected. */
-  public static Working of(Part part, Joint joint, Assessment assessment, UnitSystem units) {
+  /**
+   * The working of a selected part; of the member stiffness where nothing is selected.
+   *
+   * @param loadCase index of the load case that is shown
+   */
+  public static Working of(
+      Part part, Joint joint, Assessment assessment, UnitSystem units, int loadCase) {
     return assessment instanceof Solved solved
-        ? new PartWorking(new Found(joint, solved, new Numbers(units))).of(part)
+        ? new PartWorking(new Found(joint, solved, new Numbers(units), loadCase)).of(part)
         : unsolved(joint, (Unsolved) assessment, units);
   }
 
   /** The working of a readout. */
   public static Working of(
-      Headline headline, Joint joint, Assessment assessment, UnitSystem units) {
+      Headline headline, Joint joint, Assessment assessment, UnitSystem units, int loadCase) {
     return assessment instanceof Solved solved
-        ? new PartWorking(new Found(joint, solved, new Numbers(units))).of(headline)
+        ? new PartWorking(new Found(joint, solved, new Numbers(units), loadCase)).of(headline)
         : unsolved(joint, (Unsolved) assessment, units);
   }
 

@@ -51,6 +51,7 @@ final class FieldText {
           case LENGTH -> metric ? "0.5" : "0.0625";
           case FORCE -> metric ? "0.5" : "100";
           case RATIO -> "0.05";
+          case TEMPERATURE, TEMPERATURE_CHANGE -> "5";
           default -> "1";
         });
   }

@@ -2,8 +2,9 @@ package clampwright.view.found;
 
 import clampwright.figure.working.Headline;
 import clampwright.mechanics.Assessment.Solved;
+import clampwright.mechanics.LoadSharing;
 import clampwright.quantity.Dimension;
-import java.util.function.ToDoubleFunction;
+import java.util.function.ToDoubleBiFunction;
 
 /** The numbers that a joint comes to. */
 enum Finding {
@@ -12,32 +13,46 @@ enum Finding {
       "m",
       "Member stiffness",
       Dimension.STIFFNESS,
-      solved -> solved.sharing().memberStiffness()),
-  BOLT("Bolt  k", "b", "Bolt stiffness", Dimension.STIFFNESS, solved -> solved.bolt().stiffness()),
+      (solved, sharing) -> sharing.memberStiffness()),
+  BOLT(
+      "Bolt  k",
+      "b",
+      "Bolt stiffness",
+      Dimension.STIFFNESS,
+      (solved, sharing) -> solved.bolt().stiffness()),
   LOAD_FACTOR(
       "Load factor  Φ",
       "",
       "Load factor",
       Dimension.RATIO,
-      solved -> solved.sharing().loadFactor()),
+      (solved, sharing) -> sharing.loadFactor()),
   PARTING_LOAD(
-      "Parts at", "", "Parting load", Dimension.FORCE, solved -> solved.sharing().partingLoad()),
-  BOLT_LOAD("Bolt load", "", "Bolt load", Dimension.FORCE, solved -> solved.sharing().boltLoad()),
+      "Parts at, least",
+      "",
+      "Parting load",
+      Dimension.FORCE,
+      (solved, sharing) -> sharing.partingLoad()),
+  BOLT_LOAD(
+      "Bolt load, most", "", "Bolt load", Dimension.FORCE, (solved, sharing) -> sharing.boltLoad()),
   CLAMP_LOAD(
-      "Clamp load", "", "Clamp load", Dimension.FORCE, solved -> solved.sharing().clampLoad());
+      "Clamp load, least",
+      "",
+      "Clamp load",
+      Dimension.FORCE,
+      (solved, sharing) -> sharing.clampLoad());
 
   private final String label;
   private final String index;
   private final String title;
   private final Dimension dimension;
-  private final ToDoubleFunction<Solved> value;
+  private final ToDoubleBiFunction<Solved, LoadSharing> value;
 
   Finding(
       String label,
       String index,
       String title,
       Dimension dimension,
-      ToDoubleFunction<Solved> value) {
+      ToDoubleBiFunction<Solved, LoadSharing> value) {
     this.label = label;
     this.index = index;
     this.title = title;
@@ -69,8 +84,9 @@ enum Finding {
     return Headline.valueOf(name());
   }
 
-  double of(Solved solved) {
-    return value.applyAsDouble(solved);
+  /** Its value in a load case. */
+  double of(Solved solved, int loadCase) {
+    return value.applyAsDouble(solved, solved.cases().get(loadCase));
   }
 
   /** The id of its readout. */

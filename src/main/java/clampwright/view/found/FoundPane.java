@@ -66,7 +66,12 @@ public final class FoundPane extends ScrollPane {
     setFitToWidth(true);
     setHbarPolicy(ScrollBarPolicy.NEVER);
     setAccessibleText("Found");
-    OncePerPulse.keep(this, this::follow, model.sketchProperty(), model.assessmentProperty());
+    OncePerPulse.keep(
+        this,
+        this::follow,
+        model.sketchProperty(),
+        model.assessmentProperty(),
+        model.shownCaseProperty());
   }
 
   private String nameOf(Part part) {
@@ -113,9 +118,12 @@ public final class FoundPane extends ScrollPane {
   }
 
   private void show(Solved solved, Sketch sketch) {
-    readouts.forEach((finding, readout) -> readout.show(finding.of(solved), sketch.units()));
-    spread.show(solved.members(), sketch.joint().method().stiffness());
-    methods.show(solved.members(), sketch.joint().method().stiffness(), sketch.units());
+    int shown = model.loadCase();
+    double introduction = solved.cases().get(shown).introduction();
+    readouts.forEach((finding, readout) -> readout.show(finding.of(solved, shown), sketch.units()));
+    spread.show(solved.members(), sketch.joint().method().stiffness(), introduction);
+    methods.show(
+        solved.members(), sketch.joint().method().stiffness(), introduction, sketch.units());
     noticeRule.setVisible(!solved.notices().isEmpty());
     notices.show(
         solved.notices().stream()

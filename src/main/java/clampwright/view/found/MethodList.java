@@ -70,7 +70,8 @@ final class MethodList extends GridPane {
     add(line.why, 0, row + 1, 3, 1);
   }
 
-  void show(MemberStiffness members, StiffnessMethod chosen, UnitSystem units) {
+  void show(
+      MemberStiffness members, StiffnessMethod chosen, double introduction, UnitSystem units) {
     unit.setText(Quantities.unit(Dimension.STIFFNESS, units));
     lines.forEach(
         (method, line) -> {
@@ -82,7 +83,7 @@ final class MethodList extends GridPane {
                   : "");
           line.factor.setText(
               result instanceof Value value
-                  ? Quantities.number(Dimension.RATIO, units, value.loadFactor())
+                  ? Quantities.number(Dimension.RATIO, units, value.loadFactor(introduction))
                   : "–");
           line.why.setText(result instanceof NotApplicable not ? not.why().text() : "");
           line.why.setVisible(!applies);

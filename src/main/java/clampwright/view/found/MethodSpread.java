@@ -14,6 +14,7 @@ final class MethodSpread extends Region {
   private final FigureCanvas canvas = new FigureCanvas();
   private MemberStiffness members;
   private StiffnessMethod chosen;
+  private double introduction;
   private double drawnWidth;
 
   MethodSpread() {
@@ -26,7 +27,8 @@ final class MethodSpread extends Region {
     getChildren().add(canvas);
   }
 
-  void show(MemberStiffness members, StiffnessMethod chosen) {
+  void show(MemberStiffness members, StiffnessMethod chosen, double introduction) {
+    this.introduction = introduction;
     this.members = members;
     this.chosen = chosen;
     drawnWidth = 0;
@@ -40,7 +42,8 @@ final class MethodSpread extends Region {
       drawnWidth = getWidth();
       double perMm = FigureCanvas.PIXELS_PER_MM;
       canvas.setFigure(
-          MethodSpreadFigure.of(members, chosen, getWidth() / perMm, getHeight() / perMm));
+          MethodSpreadFigure.of(
+              members, chosen, introduction, getWidth() / perMm, getHeight() / perMm));
     }
   }
 }

@@ -15,6 +15,13 @@ final class OwnMaterial {
    */
   static Material of(Material material, double modulus) {
     String name = material.name().endsWith(MARK) ? material.name() : material.name() + MARK;
-    return new Material(name, material.family(), modulus, material.poisson(), material.expansion());
+    return new Material(
+        name,
+        material.family(),
+        modulus,
+        material.poisson(),
+        material.expansion(),
+        material.tensile(),
+        material.pressureLimit());
   }
 }

@@ -108,8 +108,8 @@ public final class PartCards {
 
   private Section load() {
     Section section = new Section("Load per bolt");
-    section.add("Axial", Fields.quantity(model, "card-axial-load", LoadSection.axial()));
-    section.add("Enters at n", Fields.quantity(model, "card-n", LoadSection.introduction()));
+    section.add("Axial", Fields.quantity(model, "card-axial-load", LoadSection.axial(model)));
+    section.add("Enters at n", Fields.quantity(model, "card-n", LoadSection.introduction(model)));
     return section;
   }
 

@@ -1,7 +1,8 @@
 package clampwright.view.given;
 
 import clampwright.edit.SketchModel;
-import clampwright.joint.Preload;
+import clampwright.joint.Target;
+import clampwright.mechanics.AssemblyPreload;
 import clampwright.quantity.Dimension;
 import clampwright.view.field.SketchNumber;
 
@@ -16,7 +17,11 @@ final class TighteningSection extends Section {
     return SketchNumber.required(
         "Preload",
         Dimension.FORCE,
-        sketch -> sketch.joint().preload().force(),
-        (sketch, value) -> sketch.withJoint(joint -> joint.withPreload(new Preload(value))));
+        sketch ->
+            AssemblyPreload.of(sketch.joint(), sketch.joint().tightening().target()).orElse(0),
+        (sketch, value) ->
+            sketch.withJoint(
+                joint ->
+                    joint.withTightening(joint.tightening().withTarget(new Target.Force(value)))));
   }
 }

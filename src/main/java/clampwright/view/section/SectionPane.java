@@ -88,6 +88,7 @@ public final class SectionPane extends Region {
             .orElse(false);
     model.sketchProperty().when(shown).subscribe((Sketch sketch) -> changed());
     model.selectionProperty().when(shown).subscribe((Part part) -> selected());
+    model.shownCaseProperty().when(shown).subscribe((Number index) -> redraw());
     model.openedProperty().when(shown).subscribe((Sketch sketch) -> viewport.beginAnew());
     viewport.sheetProperty().subscribe((Sheet sheet) -> redraw());
     tool.subscribe((Tool taken) -> redraw());
@@ -198,7 +199,8 @@ public final class SectionPane extends Region {
   /** What is drawn; made when first asked for after a change. */
   Figure figure() {
     if (figure.isEmpty()) {
-      SectionFigure.Options options = new SectionFigure.Options(model.selection(), hot, true);
+      SectionFigure.Options options =
+          new SectionFigure.Options(model.selection(), hot, true, model.loadCase());
       figure =
           Optional.of(
               SectionFigure.of(model.sketch(), model.assessment(), viewport.sheet(), options));

@@ -45,6 +45,7 @@ public final class WorkingPane extends ScrollPane {
         model.sketchProperty(),
         model.assessmentProperty(),
         model.selectionProperty(),
+        model.shownCaseProperty(),
         headline);
   }
 
@@ -73,9 +74,17 @@ public final class WorkingPane extends ScrollPane {
     Sketch sketch = model.sketch();
     return headline
         .get()
-        .map(is -> Working.of(is, sketch.joint(), model.assessment(), sketch.units()))
+        .map(
+            is ->
+                Working.of(
+                    is, sketch.joint(), model.assessment(), sketch.units(), model.loadCase()))
         .orElseGet(
             () ->
-                Working.of(model.selection(), sketch.joint(), model.assessment(), sketch.units()));
+                Working.of(
+                    model.selection(),
+                    sketch.joint(),
+                    model.assessment(),
+                    sketch.units(),
+                    model.loadCase()));
   }
 }

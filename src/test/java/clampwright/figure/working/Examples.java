@@ -2,17 +2,19 @@ package clampwright.figure.working;
 
 import clampwright.joint.Anchor;
 import clampwright.joint.AngleRule;
+import clampwright.joint.Criteria;
 import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Head;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
 import clampwright.joint.Outline;
-import clampwright.joint.Preload;
 import clampwright.joint.ScrewThread;
+import clampwright.joint.Service;
 import clampwright.joint.Strength;
+import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -66,8 +68,9 @@ final class Examples {
         WasherRule.AUTOMATIC,
         WasherRule.AUTOMATIC,
         Method.USUAL.withAngle(angle),
-        new Preload(20_000),
-        new Load(5_000, 1));
+        Tightening.force(20_000),
+        Service.of(LoadCase.steady("Working load", 5_000, 1)),
+        Criteria.USUAL);
   }
 
   /**

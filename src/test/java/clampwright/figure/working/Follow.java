@@ -19,7 +19,7 @@ final class Follow {
   static List<Working> all(Joint joint, Assessment assessment, UnitSystem units) {
     List<Working> workings = new ArrayList<>();
     for (Headline headline : Headline.values()) {
-      workings.add(Working.of(headline, joint, assessment, units));
+      workings.add(Working.of(headline, joint, assessment, units, 0));
     }
     List<Part> parts =
         new ArrayList<>(
@@ -28,7 +28,7 @@ final class Follow {
     for (int i = 0; i < joint.elements().size(); i++) {
       parts.add(Part.element(i));
     }
-    parts.forEach(part -> workings.add(Working.of(part, joint, assessment, units)));
+    parts.forEach(part -> workings.add(Working.of(part, joint, assessment, units, 0)));
     return workings;
   }
 

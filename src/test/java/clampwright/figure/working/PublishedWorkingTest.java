@@ -16,11 +16,11 @@ import org.junit.jupiter.params.provider.CsvSource;
 class PublishedWorkingTest {
 
   private static Working inches(Joint joint, Part part) {
-    return Working.of(part, joint, Assessment.of(joint), UnitSystem.INCH);
+    return Working.of(part, joint, Assessment.of(joint), UnitSystem.INCH, 0);
   }
 
   private static Working inches(Joint joint, Headline headline) {
-    return Working.of(headline, joint, Assessment.of(joint), UnitSystem.INCH);
+    return Working.of(headline, joint, Assessment.of(joint), UnitSystem.INCH, 0);
   }
 
   /** Shigley ex. 8-2 and solutions, 8th ed.: frusta in Mlbf/in (from memory, recomputed). */
@@ -85,7 +85,8 @@ class PublishedWorkingTest {
   })
   void edgesCutTheDisc(String label, double expected) {
     Joint joint = Examples.strip();
-    Working working = Working.of(Part.element(0), joint, Assessment.of(joint), UnitSystem.METRIC);
+    Working working =
+        Working.of(Part.element(0), joint, Assessment.of(joint), UnitSystem.METRIC, 0);
     double followed = Expression.value(Follow.step(working, label).numbers());
     assertEquals(expected, followed, 1e-5 * expected);
   }

@@ -8,9 +8,10 @@ import clampwright.joint.Anchor;
 import clampwright.joint.AngleRule;
 import clampwright.joint.Element;
 import clampwright.joint.Joint;
-import clampwright.joint.Load;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Outline;
 import clampwright.joint.Part;
+import clampwright.joint.Service;
 import clampwright.joint.WasherRule;
 import clampwright.mechanics.Assessment;
 import clampwright.quantity.UnitSystem;
@@ -23,7 +24,7 @@ class WordsInWorkingTest {
   private static final Element BASE = Examples.layer("Base", 20, 11, Outline.WIDE, 100_000);
 
   private static Working of(Joint joint, Part part) {
-    return Working.of(part, joint, Assessment.of(joint), UnitSystem.METRIC);
+    return Working.of(part, joint, Assessment.of(joint), UnitSystem.METRIC, 0);
   }
 
   private static Joint joint(Element... elements) {
@@ -135,7 +136,8 @@ class WordsInWorkingTest {
   @Test
   void methodsThatDoNotApplySayWhy() {
     Joint joint = joint(COVER, BASE);
-    Working working = Working.of(Headline.MEMBERS, joint, Assessment.of(joint), UnitSystem.METRIC);
+    Working working =
+        Working.of(Headline.MEMBERS, joint, Assessment.of(joint), UnitSystem.METRIC, 0);
     Step vdi = Follow.step(working, "Beside it, VDI 2230");
     assertTrue(vdi.isRemark());
     assertEquals("not applicable: needs the body's outside diameter", vdi.formula());
@@ -143,7 +145,7 @@ class WordsInWorkingTest {
 
   @Test
   void noticesStandBelowTheWorkingOfTheirPart() {
-    Joint parted = joint(COVER, BASE).withLoad(new Load(60_000, 1));
+    Joint parted = joint(COVER, BASE).withService(Service.of(LoadCase.steady("Load", 60_000, 1)));
     Step note = Follow.step(of(parted, Part.LOAD), "Note: Load");
     assertEquals("The axial load parts the joint; the bolt alone carries it.", note.formula());
     Working strip = of(Examples.strip(), Part.element(0));

@@ -83,7 +83,7 @@ class WorkingTest {
   private static void checkElements(Joint joint, Solved solved, UnitSystem units) {
     for (int i = 0; i < solved.elements().size(); i++) {
       ElementFinding finding = solved.elements().get(i);
-      Working working = Working.of(Part.element(i), joint, solved, units);
+      Working working = Working.of(Part.element(i), joint, solved, units, 0);
       checkStep(working, "Area", Dimension.AREA, units, finding.area());
       checkStep(working, "Stiffness", Dimension.STIFFNESS, units, finding.stiffness());
       if (finding.wholeWasher()) {
@@ -127,7 +127,7 @@ class WorkingTest {
       UnitSystem units,
       Dimension dimension,
       double value) {
-    Working working = Working.of(headline, joint, solved, units);
+    Working working = Working.of(headline, joint, solved, units, 0);
     String last =
         working.steps().stream()
             .filter(step -> !step.isRemark())

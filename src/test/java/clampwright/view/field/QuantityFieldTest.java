@@ -5,8 +5,9 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import clampwright.edit.SketchModel;
-import clampwright.joint.Preload;
 import clampwright.joint.Sketch;
+import clampwright.joint.Target;
+import clampwright.joint.Tightening;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.UnitSystem;
 import clampwright.view.Sketches;
@@ -42,8 +43,9 @@ class QuantityFieldTest {
       SketchNumber.required(
           "Preload",
           Dimension.FORCE,
-          sketch -> sketch.joint().preload().force(),
-          (sketch, value) -> sketch.withJoint(joint -> joint.withPreload(new Preload(value))));
+          sketch -> ((Target.Force) sketch.joint().tightening().target()).force(),
+          (sketch, value) ->
+              sketch.withJoint(joint -> joint.withTightening(Tightening.force(value))));
   private static final SketchNumber LENGTH =
       SketchNumber.optional(
           "Bolt length",
