@@ -3,6 +3,9 @@ package clampwright.bench;
 import clampwright.joint.Joint;
 import clampwright.joint.Outline;
 import clampwright.mechanics.Assessment;
+import clampwright.mechanics.checks.Checks;
+import clampwright.mechanics.checks.Verdict;
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -23,12 +26,19 @@ import org.openjdk.jmh.annotations.Warmup;
 @Measurement(iterations = 8, time = 1)
 public class AssessmentBench {
   private final Joint plain = TwelveLayers.with(Outline.WIDE);
+  private final Joint loaded = TwelveLayers.loaded(8, 3);
   private final Joint strips = TwelveLayers.with(new Outline.Strip(14, 18));
 
   /** Round and wide parts only. */
   @Benchmark
   public Assessment withoutStrips() {
     return Assessment.of(plain);
+  }
+
+  /** Eight load cases at three temperatures, all checks by all methods; target at most 50 µs. */
+  @Benchmark
+  public List<Verdict> allChecks() {
+    return Checks.of(loaded, (Assessment.Solved) Assessment.of(loaded));
   }
 
   /** Every other layer cut by straight edges: quadrature instead of closed forms. */

@@ -112,7 +112,8 @@ final class FrameBench {
     double scale = FigureCanvas.PIXELS_PER_MM;
     Sheet sheet =
         SectionFigure.fitted(sketch, section.getWidth() / scale, section.getHeight() / scale);
-    SectionFigure.Options options = new SectionFigure.Options(Part.JOINT, Optional.empty(), true);
+    SectionFigure.Options options =
+        new SectionFigure.Options(Part.JOINT, Optional.empty(), true, 0);
     Figure figure = SectionFigure.of(sketch, Assessment.of(sketch.joint()), sheet, options);
     for (Mark mark : figure.marks()) {
       if (mark instanceof Mark.Path path && isFace(mark.tag())) {

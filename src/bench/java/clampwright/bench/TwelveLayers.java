@@ -10,9 +10,11 @@ import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
 import clampwright.joint.Outline;
+import clampwright.joint.Scatter;
 import clampwright.joint.ScrewThread;
 import clampwright.joint.Service;
 import clampwright.joint.Strength;
+import clampwright.joint.TemperatureCase;
 import clampwright.joint.Tightening;
 import clampwright.joint.WasherRule;
 import java.util.ArrayList;
@@ -47,6 +49,41 @@ final class TwelveLayers {
         Tightening.force(25_000),
         Service.of(LoadCase.steady("Working load", 8_000, 0.5)),
         Criteria.USUAL);
+  }
+
+  /**
+   * The same without strips, under many loads at many temperatures, all of which pull and shear.
+   */
+  static Joint loaded(int loads, int temperatures) {
+    List<LoadCase> cases = new ArrayList<>();
+    for (int i = 0; i < loads; i++) {
+      cases.add(
+          LoadCase.steady("Load " + i, 6_000 + 400 * i, 0.5)
+              .withAxial(1_000, 6_000 + 400 * i)
+              .withShear(500 + 100 * i));
+    }
+    List<TemperatureCase> states = new ArrayList<>();
+    for (int i = 0; i < temperatures; i++) {
+      states.add(new TemperatureCase("State " + i, 20 + 40 * i, 20 + 30 * i));
+    }
+    Joint joint = with(Outline.WIDE);
+    List<Element> elements =
+        joint.elements().stream()
+            .map(
+                element ->
+                    element.withMaterial(
+                        element
+                            .material()
+                            .withTensile(OptionalDouble.of(360))
+                            .withPressureLimit(OptionalDouble.of(500))))
+            .toList();
+    return joint
+        .withElements(elements)
+        .withService(new Service(20, states, cases))
+        .withTightening(
+            Tightening.force(25_000)
+                .withScatter(new Scatter.PlusMinus(0.25))
+                .withThreadFriction(OptionalDouble.of(0.12)));
   }
 
   private static Fastener fastener(Material steel) {

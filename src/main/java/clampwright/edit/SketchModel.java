@@ -4,6 +4,9 @@ import clampwright.joint.Joint;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.Assessment;
+import clampwright.mechanics.checks.Checks;
+import clampwright.mechanics.checks.Verdict;
+import java.util.List;
 import java.util.function.UnaryOperator;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
@@ -42,6 +45,11 @@ public final class SketchModel {
   private Joint assessedJoint;
   private Assessment lastAssessment;
 
+  /** What the verdicts below belong to. */
+  private Assessment judged;
+
+  private List<Verdict> lastVerdicts = List.of();
+
   private final ReadOnlyObjectWrapper<Sketch> opened;
 
   private final IntegerProperty shownCase = new SimpleIntegerProperty(this, "shownCase");
@@ -79,6 +87,18 @@ public final class SketchModel {
       assessedJoint = sketch.joint();
     }
     return lastAssessment;
+  }
+
+  /** What the checks say of the present sketch; none while it has no solution. */
+  public List<Verdict> verdicts() {
+    if (!(assessment() instanceof Assessment.Solved solved)) {
+      return List.of();
+    }
+    if (judged != solved) {
+      judged = solved;
+      lastVerdicts = Checks.of(sketch().joint(), solved);
+    }
+    return lastVerdicts;
   }
 
   /** The selected part; {@link Part#JOINT} when nothing is. Never points at a missing element. */

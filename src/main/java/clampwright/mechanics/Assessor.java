@@ -3,7 +3,6 @@ package clampwright.mechanics;
 import clampwright.joint.Joint;
 import clampwright.joint.LoadCase;
 import clampwright.joint.Part;
-import clampwright.joint.Service;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.Assessment.Unsolved;
 import clampwright.mechanics.Reason.Cause;
@@ -62,7 +61,7 @@ final class Assessor {
     Preload preload = Preload.of(joint, nominal.getAsDouble(), findings);
     List<LoadSharing> cases = new ArrayList<>();
     for (LoadCase load : joint.service().loads()) {
-      cases.add(shared(joint, load, chosen, bolt.stiffness(), preload, findings));
+      cases.add(shared(load, chosen, bolt.stiffness(), preload, findings));
     }
     return new Solved(
         described(angles, faces, zone),
@@ -75,7 +74,6 @@ final class Assessor {
   }
 
   private static LoadSharing shared(
-      Joint joint,
       LoadCase load,
       MemberStiffness.Value chosen,
       double bolt,
@@ -87,19 +85,9 @@ final class Assessor {
         chosen.stiffness(),
         introduction,
         chosen.loadFactor(introduction),
-        preload.inService(series, state(joint.service(), load, preload)),
+        preload.inService(series, preload.state(load)),
         load.axialMin(),
         load.axialMax());
-  }
-
-  /** The temperature case that a load meets; any where it names none, or one that is gone. */
-  static int state(Service service, LoadCase load, Preload preload) {
-    for (int i = 0; i < preload.mismatches().size(); i++) {
-      if (load.temperature().equals(Optional.of(service.temperatures().get(i).name()))) {
-        return i;
-      }
-    }
-    return Preload.ANY;
   }
 
   private static List<Reason> noBearing(PressureZone zone) {

@@ -3,6 +3,7 @@ package clampwright.mechanics;
 import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Joint;
+import clampwright.joint.LoadCase;
 import clampwright.joint.Material;
 import clampwright.joint.Service;
 import clampwright.joint.TemperatureCase;
@@ -85,6 +86,17 @@ public record Preload(
             .map(Element::material)
             .map(Material::expansion)
             .allMatch(java.util.OptionalDouble::isPresent);
+  }
+
+  /** The temperature case that a load meets; ANY where it names none, or one that is gone. */
+  public int state(LoadCase load) {
+    for (int i = 0; i < mismatches.size(); i++) {
+      if (load.temperature().isPresent()
+          && load.temperature().get().equals(mismatches.get(i).name())) {
+        return i;
+      }
+    }
+    return ANY;
   }
 
   /** Least preload at assembly, F_nom·(1 − s) [N]. */

@@ -27,7 +27,7 @@ public final class Torsion {
   }
 
   /** von Mises equivalent √(σ² + 3 τ²) [MPa]. */
-  static double equivalent(double tension, double shear) {
+  public static double equivalent(double tension, double shear) {
     return Math.sqrt(tension * tension + 3 * shear * shear);
   }
 

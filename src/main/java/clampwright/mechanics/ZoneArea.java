@@ -18,7 +18,7 @@ public final class ZoneArea {
   }
 
   /** Area of the disc inside the outline [mm²]; a strip cuts two circular segments off. */
-  static double disc(double radius, Outline outline) {
+  public static double disc(double radius, Outline outline) {
     if (outline instanceof Outline.Strip strip) {
       return Math.PI * radius * radius
           - segment(radius, strip.left())

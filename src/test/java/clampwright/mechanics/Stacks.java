@@ -21,30 +21,30 @@ import java.util.List;
 import java.util.OptionalDouble;
 
 /** Joints for tests, in whatever consistent units the source of the check uses. */
-final class Stacks {
+public final class Stacks {
   private Stacks() {}
 
-  static final Strength CLASS_88 =
+  public static final Strength CLASS_88 =
       new Strength("ISO 898-1", "8.8", OptionalDouble.of(580), OptionalDouble.of(640), 800);
 
-  static Material steel(double modulus) {
+  public static Material steel(double modulus) {
     return material(Material.Family.STEEL, modulus);
   }
 
-  static Material material(Material.Family family, double modulus) {
+  public static Material material(Material.Family family, double modulus) {
     return new Material(
         family + " " + modulus, family, modulus, OptionalDouble.empty(), OptionalDouble.empty());
   }
 
-  static Element layer(double thickness, double hole, double modulus) {
+  public static Element layer(double thickness, double hole, double modulus) {
     return layer(thickness, hole, modulus, Outline.WIDE);
   }
 
-  static Element layer(double thickness, double hole, double modulus, Outline outline) {
+  public static Element layer(double thickness, double hole, double modulus, Outline outline) {
     return new Element("layer", Element.Kind.LAYER, thickness, hole, outline, steel(modulus));
   }
 
-  static Element washer(double thickness, double hole, double diameter, double modulus) {
+  public static Element washer(double thickness, double hole, double diameter, double modulus) {
     return new Element(
         "washer",
         Element.Kind.WASHER,
@@ -54,7 +54,7 @@ final class Stacks {
         steel(modulus));
   }
 
-  static Fastener bolt(ScrewThread thread, double headFace, double nutFace, double modulus) {
+  public static Fastener bolt(ScrewThread thread, double headFace, double nutFace, double modulus) {
     double d = thread.diameter();
     return new Fastener(
         thread,
@@ -68,11 +68,11 @@ final class Stacks {
         steel(modulus));
   }
 
-  static Fastener tapped(Fastener fastener) {
+  public static Fastener tapped(Fastener fastener) {
     return fastener.withAnchor(new Anchor.Tapped());
   }
 
-  static Joint joint(Fastener fastener, AngleRule angle, Element... elements) {
+  public static Joint joint(Fastener fastener, AngleRule angle, Element... elements) {
     return new Joint(
         fastener,
         List.of(elements),
@@ -84,7 +84,7 @@ final class Stacks {
         Criteria.USUAL);
   }
 
-  static Assessment.Solved solved(Joint joint) {
+  public static Assessment.Solved solved(Joint joint) {
     Assessment assessment = Assessment.of(joint);
     if (assessment instanceof Assessment.Solved solved) {
       return solved;
@@ -92,7 +92,7 @@ final class Stacks {
     throw new AssertionError("not solved: " + assessment);
   }
 
-  static List<Reason> reasons(Joint joint) {
+  public static List<Reason> reasons(Joint joint) {
     Assessment assessment = Assessment.of(joint);
     if (assessment instanceof Assessment.Unsolved unsolved) {
       return unsolved.reasons();
@@ -100,7 +100,7 @@ final class Stacks {
     throw new AssertionError("solved: " + assessment);
   }
 
-  static double stiffness(Joint joint, StiffnessMethod method) {
+  public static double stiffness(Joint joint, StiffnessMethod method) {
     MemberStiffness.Result result = solved(joint).members().get(method);
     if (result instanceof MemberStiffness.Value value) {
       return value.stiffness();

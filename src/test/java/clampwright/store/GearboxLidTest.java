@@ -5,6 +5,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import clampwright.mechanics.Assessment;
 import clampwright.mechanics.ElementFinding;
 import clampwright.mechanics.Side;
+import clampwright.mechanics.checks.CheckKind;
+import clampwright.mechanics.checks.Checks;
+import clampwright.mechanics.checks.Verdict;
 import org.junit.jupiter.api.Test;
 
 /**
@@ -76,12 +79,69 @@ class GearboxLidTest {
     checkNear(260_376.2874, SOLVED.bolt().stiffness());
   }
 
-  /** Φ = 0.7 k_b/(k_b + k_m); 22 000 N of preload, 6000 N of load. */
+  /**
+   * T = 36 N·m, both frictions 0.12, D_b = (14.63 + 10.5)/2 = 12.565 mm: 1.5/2π + 0.12·9.0257215/(2
+   * cos 30°) + 0.12·12.565/2 = 0.23873241 + 0.62532033 + 0.7539 = 1.61795274 mm, F = 36
+   * 000/1.61795274 = 22 250.3408 N; ± 23 %: 17 132.7624 … 27 367.9192 N.
+   */
+  @Test
+  void thePreloadAtAssembly() {
+    checkNear(22_250.340841, SOLVED.preload().nominal());
+    checkNear(17_132.762448, SOLVED.preload().assemblyMin());
+    checkNear(27_367.919235, SOLVED.preload().assemblyMax());
+  }
+
+  /**
+   * Series stiffness 260 376.2874·1 324 511.6126/1 584 887.9 = 217 599.87966 N/mm. Settling, R_z 10
+   * … 40 µm: thread 3, two faces 3 each, five interfaces 2 each: 19 µm, F_Z = 4134.39771 N.
+   *
+   * <p>Members Σ α·t = (2 + 4)·11.7 + 10·23.6 + 1.5·17.2 + 6·19.9 + 18·11.4 = 656.6 µm/K·10⁻³, bolt
+   * 41.5·11.7 = 485.55. Hot oil: 656.6e-6·70 − 485.55e-6·60 = 0.016829 mm, +3661.98837 N. Cold
+   * start: −40·(656.6 − 485.55)e-6 = −0.006842 mm, −1488.81838 N.
+   *
+   * <p>Least 17 132.7624 − 4134.3977 − 1488.8184 = 11 509.54636 N, greatest 27 367.9192 + 3661.9884
+   * = 31 029.90761 N, nominal 22 250.3408 − 4134.3977 = 18 115.94313 N.
+   */
+  @Test
+  void thePreloadInService() {
+    checkNear(217_599.879655, SOLVED.series());
+    checkNear(4_134.397713, SOLVED.preload().settling(SOLVED.series()));
+    checkNear(3_661.988375, SOLVED.preload().thermal(SOLVED.series(), 0));
+    checkNear(-1_488.818377, SOLVED.preload().thermal(SOLVED.series(), 1));
+    checkNear(11_509.546358, SOLVED.sharing().preload().min());
+    checkNear(18_115.943127, SOLVED.sharing().preload().nominal());
+    checkNear(31_029.907609, SOLVED.sharing().preload().max());
+  }
+
+  /**
+   * Φ = 0.7 k_b/(k_b + k_m). Running, 6000 N: bolt 31 029.9076 + 0.115·6000 = 31 719.9125 N, clamp
+   * 11 509.5464 − 0.885·6000 = 6199.5513 N, parts at 11 509.5464/0.885 = 13 005.1491 N.
+   */
   @Test
   void theLoads() {
     checkNear(0.115000816, SOLVED.sharing().loadFactor());
-    checkNear(22_690.0049, SOLVED.sharing().boltLoad());
-    checkNear(16_690.0049, SOLVED.sharing().clampLoad());
-    checkNear(24_858.7800, SOLVED.sharing().partingLoad());
+    checkNear(31_719.912503, SOLVED.sharing().boltLoad());
+    checkNear(6_199.551251, SOLVED.sharing().clampLoad());
+    checkNear(13_005.149113, SOLVED.sharing().partingLoad());
+  }
+
+  /**
+   * At tightening: σ = 27 367.9192/57.989597 = 471.945326, τ = 27 367.9192·0.86405274/(π·d_s³/12)
+   * with d_s = (9.0257215 + 8.1596965)/2 = 8.592709 mm: 142.371511, √(σ² + 3τ²) = 532.485993 MPa,
+   * margin 640/532.485993 − 1. Parting: the pressure test pulls 9000 N at −20 °C, 11 509.5464/9000
+   * − 1. Slip: 0.15·6199.5513/600 − 1.
+   */
+  @Test
+  void theMargins() {
+    checkMargin(CheckKind.YIELD_AT_TIGHTENING, 0.201909510);
+    checkMargin(CheckKind.PARTING, 0.278838484);
+    checkMargin(CheckKind.SLIP, 0.549887813);
+  }
+
+  private static void checkMargin(CheckKind kind, double margin) {
+    Stored.Opened opened = (Stored.Opened) Samples.open(Samples.all().get(0));
+    Verdict verdict = Checks.of(opened.sketch().joint(), SOLVED).get(kind.ordinal());
+    assertEquals(kind, verdict.kind());
+    assertEquals(margin, ((Verdict.Judged) verdict).margin(), 1e-6);
   }
 }
