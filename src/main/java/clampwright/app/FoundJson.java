@@ -11,8 +11,10 @@ import clampwright.mechanics.Band;
 import clampwright.mechanics.ElementFinding;
 import clampwright.mechanics.LoadSharing;
 import clampwright.mechanics.MemberStiffness;
+import clampwright.mechanics.Preload;
 import clampwright.mechanics.Side;
 import clampwright.mechanics.Zone;
+import clampwright.mechanics.checks.Checks;
 import com.google.gson.Gson;
 import com.google.gson.GsonBuilder;
 import com.google.gson.JsonArray;
@@ -38,6 +40,8 @@ final class FoundJson {
     root.addProperty("chosenMethod", word(joint.method().stiffness()));
     number(root, "boltStiffness", solved.bolt().stiffness());
     addLoads(root, solved);
+    root.add("loadCases", loadCases(joint, solved));
+    root.add("checks", ChecksJson.of(joint, Checks.of(joint, solved)));
     root.add("notices", notices(joint, solved));
     root.addProperty("caution", Sentences.CAUTION);
     return GSON.toJson(root) + "\n";
@@ -49,11 +53,53 @@ final class FoundJson {
     JsonObject load = new JsonObject();
     number(load, "axial", sharing.axialMax());
     number(root, "loadFactor", sharing.loadFactor());
-    root.add("preload", band(sharing.preload()));
+    root.add("preload", preload(solved));
     root.add("load", load);
     number(root, "boltLoad", sharing.boltLoad());
     number(root, "clampLoad", sharing.clampLoad());
     number(root, "partingLoad", sharing.partingLoad());
+  }
+
+  /** In service for the first load case; then at assembly and in each temperature case. */
+  private static JsonObject preload(Solved solved) {
+    Preload preload = solved.preload();
+    JsonObject json = band(solved.sharing().preload());
+    Band assembly = new Band(preload.assemblyMin(), preload.nominal(), preload.assemblyMax());
+    json.add("assembly", band(assembly));
+    number(json, "settling", preload.settling(solved.series()));
+    number(json, "relaxed", preload.relaxed());
+    JsonArray states = new JsonArray();
+    JsonObject room = band(preload.inService(solved.series(), Preload.ROOM));
+    room.addProperty("name", "at assembly temperature");
+    states.add(room);
+    for (int i = 0; i < preload.mismatches().size(); i++) {
+      JsonObject state = band(preload.inService(solved.series(), i));
+      state.addProperty("name", preload.mismatches().get(i).name());
+      number(state, "change", preload.thermal(solved.series(), i));
+      states.add(state);
+    }
+    json.add("temperatures", states);
+    return json;
+  }
+
+  private static JsonArray loadCases(Joint joint, Solved solved) {
+    JsonArray cases = new JsonArray();
+    for (int i = 0; i < solved.cases().size(); i++) {
+      LoadSharing sharing = solved.cases().get(i);
+      JsonObject json = new JsonObject();
+      json.addProperty("name", joint.service().loads().get(i).name());
+      number(json, "axialMin", sharing.axialMin());
+      number(json, "axialMax", sharing.axialMax());
+      number(json, "shear", joint.service().loads().get(i).shear());
+      number(json, "introduction", sharing.introduction());
+      number(json, "loadFactor", sharing.loadFactor());
+      json.add("preload", band(sharing.preload()));
+      number(json, "boltLoad", sharing.boltLoad());
+      number(json, "clampLoad", sharing.clampLoad());
+      number(json, "partingLoad", sharing.partingLoad());
+      cases.add(json);
+    }
+    return cases;
   }
 
   private static JsonObject band(Band band) {
@@ -151,7 +197,7 @@ final class FoundJson {
     return json;
   }
 
-  private static String word(StiffnessMethod method) {
+  static String word(StiffnessMethod method) {
     return switch (method) {
       case MID_PLANE_CYLINDERS -> "midPlaneCylinders";
       case FULL_FRUSTA -> "fullFrusta";
@@ -170,7 +216,7 @@ final class FoundJson {
   }
 
   /** Fourteen figures: all that the arithmetic is good for, without the noise behind them. */
-  private static void number(JsonObject json, String key, double value) {
+  static void number(JsonObject json, String key, double value) {
     BigDecimal rounded = new BigDecimal(value).round(new MathContext(14)).stripTrailingZeros();
     boolean plain = rounded.scale() < 0 && rounded.scale() > -16;
     json.addProperty(key, plain ? rounded.setScale(0) : rounded);

@@ -1,7 +1,9 @@
 package clampwright.app;
 
 import clampwright.figure.Sentences;
+import clampwright.figure.Verdicts;
 import clampwright.joint.Element;
+import clampwright.joint.Factors;
 import clampwright.joint.Joint;
 import clampwright.joint.Sketch;
 import clampwright.joint.StiffnessMethod;
@@ -11,6 +13,8 @@ import clampwright.mechanics.LoadSharing;
 import clampwright.mechanics.MemberStiffness;
 import clampwright.mechanics.Side;
 import clampwright.mechanics.Zone;
+import clampwright.mechanics.checks.Checks;
+import clampwright.mechanics.checks.Verdict;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
 import clampwright.quantity.UnitSystem;
@@ -39,6 +43,7 @@ final class FoundTable {
         parts(),
         readouts(),
         methods(),
+        checks(),
         notices() + Sentences.CAUTION + "\n");
   }
 
@@ -142,6 +147,36 @@ final class FoundTable {
       }
     }
     return table.text();
+  }
+
+  private String checks() {
+    Joint joint = sketch.joint();
+    TextTable table = new TextTable("lrrrl");
+    table.row("check", "demand", "capacity", "margin", "");
+    for (Verdict verdict : Checks.of(joint, solved)) {
+      String name = Sentences.check(verdict.kind());
+      if (verdict instanceof Verdict.Judged judged) {
+        Dimension dimension = Verdicts.dimension(judged.kind());
+        table.row(
+            name,
+            text(dimension, judged.demand()),
+            text(dimension, judged.capacity()),
+            Verdicts.margin(judged.margin()),
+            (judged.passes() ? "" : "fails; ") + Sentences.where(judged.where(), joint));
+      } else if (verdict instanceof Verdict.NotApplicable not) {
+        table.row(name, "–", "–", "–", "not applicable: " + not.why().text());
+      }
+    }
+    return table.text() + factors();
+  }
+
+  private String factors() {
+    boolean none = joint().criteria().factors().equals(Factors.NONE);
+    return none ? "All factors are 1.0: none has been set.\n" : "";
+  }
+
+  private Joint joint() {
+    return sketch.joint();
   }
 
   private String notices() {

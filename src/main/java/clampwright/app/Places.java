@@ -21,6 +21,7 @@ final class Places {
       case HEAD_CONE -> "head's cone";
       case NUT_CONE -> "nut's cone";
       case LOAD -> "load";
+      case PRELOAD -> "preload";
     };
   }
 

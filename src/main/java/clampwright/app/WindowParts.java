@@ -2,6 +2,8 @@ package clampwright.app;
 
 import clampwright.edit.SketchModel;
 import clampwright.figure.working.Headline;
+import clampwright.mechanics.checks.CheckKind;
+import clampwright.view.diagram.JointDiagramPane;
 import clampwright.view.found.FoundPane;
 import clampwright.view.given.GivenPane;
 import clampwright.view.schedule.SchedulePane;
@@ -41,12 +43,17 @@ final class WindowParts {
   }
 
   Node found() {
-    return new FoundPane(model, this::openWorking);
+    return new FoundPane(model, this::openWorking, this::openCheck);
   }
 
   private void openWorking(Headline headline) {
     drawer.show("Working");
     working.show(headline);
+  }
+
+  private void openCheck(CheckKind check) {
+    drawer.show("Working");
+    working.show(check);
   }
 
   /** The drawer with its tabs. */
@@ -55,6 +62,7 @@ final class WindowParts {
     drawer = new Drawer(settings.values().drawerHeight);
     drawer.add("Schedule", () -> new SchedulePane(model));
     drawer.add("Working", () -> working);
+    drawer.add("Joint diagram", () -> new JointDiagramPane(model));
     drawer.show("Schedule");
     drawer.openProperty().set(settings.values().drawerOpen);
     return drawer;

@@ -21,6 +21,7 @@ public final class Names {
       case HEAD_CONE -> "head's cone";
       case NUT_CONE -> "nut's cone";
       case LOAD -> "load";
+      case PRELOAD -> "preload";
       case ELEMENT -> of(joint.elements().get(part.index()), part.index());
     };
   }

@@ -50,6 +50,17 @@ public enum Role {
   SCALE_TEXT,
   POINT,
   POINT_CHOSEN,
+  /** From the least to the greatest preload, filled. */
+  PRELOAD_BAND,
+  /** A rung of the load ladder: a limit or a load; the bolt's load; the preload aimed at. */
+  RUNG,
+  RUNG_BOLT,
+  RUNG_PRELOAD,
+  /** Lines of the joint diagram, with the nominal preload and, faint, with the limits. */
+  BOLT_LINE,
+  MEMBERS_LINE,
+  BOLT_LINE_FAINT,
+  MEMBERS_LINE_FAINT,
   /** Frame of the selected part; its grips; what lies under the pointer; an insertion grip. */
   SELECTION,
   GRIP,

@@ -1,6 +1,7 @@
 package clampwright.figure;
 
 import clampwright.joint.AngleRule;
+import clampwright.joint.Joint;
 import clampwright.joint.StiffnessMethod;
 import clampwright.joint.WasherRule;
 import clampwright.mechanics.BoltStiffness;
@@ -8,9 +9,13 @@ import clampwright.mechanics.Notice;
 import clampwright.mechanics.Reason;
 import clampwright.mechanics.Side;
 import clampwright.mechanics.Zone.WasherDecision;
+import clampwright.mechanics.checks.CheckKind;
+import clampwright.mechanics.checks.Verdict;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
 import clampwright.quantity.UnitSystem;
+import java.util.ArrayList;
+import java.util.List;
 
 /** Findings in words, in the reader's units. */
 public final class Sentences {
@@ -175,6 +180,45 @@ public final class Sentences {
         + (whole ? " ≤ " : " > ")
         + "t·tan α "
         + length(decision.limit(), units);
+  }
+
+  /** A check as it is listed. */
+  public static String check(CheckKind kind) {
+    return switch (kind) {
+      case YIELD_AT_TIGHTENING -> "yield at tightening";
+      case STRESS_IN_SERVICE -> "stress in service";
+      case RUPTURE -> "rupture under load";
+      case YIELD_UNDER_LOAD -> "yield under load";
+      case PARTING -> "parting";
+      case SLIP -> "slip";
+      case SHEAR_WITH_TENSION -> "shear with tension";
+      case BEARING_PRESSURE -> "pressure under faces";
+      case CRUSHING -> "crushing of narrow parts";
+      case HOLE_BEARING -> "pressure in the hole";
+      case THREAD_STRIPPING -> "thread stripping";
+      case FATIGUE -> "fatigue";
+    };
+  }
+
+  /**
+   * The worst case of a check: load case, temperature, stiffness method; empty where none enters.
+   */
+  public static String where(Verdict.Where where, Joint joint) {
+    List<String> words = new ArrayList<>();
+    if (where.loadCase() >= 0) {
+      words.add(loadCase(joint, where.loadCase()));
+    }
+    if (where.temperature() >= 0) {
+      words.add(joint.service().temperatures().get(where.temperature()).name());
+    }
+    where.method().ifPresent(method -> words.add(shortMethod(method)));
+    return String.join(" · ", words);
+  }
+
+  /** The name of a load case; its number where it has none. */
+  public static String loadCase(Joint joint, int index) {
+    String name = joint.service().loads().get(index).name();
+    return name.isBlank() ? "load case " + (index + 1) : name;
   }
 
   public static String spring(BoltStiffness.Kind kind) {

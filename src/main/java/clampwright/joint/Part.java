@@ -22,7 +22,8 @@ public record Part(Kind kind, int index) {
     ELEMENT,
     HEAD_CONE,
     NUT_CONE,
-    LOAD
+    LOAD,
+    PRELOAD
   }
 
   public static final Part JOINT = new Part(Kind.JOINT, -1);
@@ -32,6 +33,7 @@ public record Part(Kind kind, int index) {
   public static final Part HEAD_CONE = new Part(Kind.HEAD_CONE, -1);
   public static final Part NUT_CONE = new Part(Kind.NUT_CONE, -1);
   public static final Part LOAD = new Part(Kind.LOAD, -1);
+  public static final Part PRELOAD = new Part(Kind.PRELOAD, -1);
 
   public Part {
     Objects.requireNonNull(kind, "kind");

@@ -88,12 +88,15 @@ record ThreadLimits(
     return diameter;
   }
 
-  /** The nearest preferred number; of two equally near the larger [µm]. */
+  /**
+   * The nearest preferred number; of two equally near the larger [µm]. Of a thread so far from any
+   * standard that the formula gives none, what the formula gives.
+   */
   private static double rounded(double value) {
-    double decade = 1;
-    while (value < R40[0] * decade) {
-      decade /= 10;
+    if (!(value > 0 && value < Double.MAX_VALUE)) {
+      return value;
     }
+    double decade = Math.pow(10, Math.floor(Math.log10(value / R40[0])));
     double best = R40[0] * decade;
     for (double number : R40) {
       if (Math.abs(number * decade - value) <= Math.abs(best - value)) {

@@ -22,7 +22,8 @@ public final class Palette {
           0xFFFFFFFF,
           0xFF9AA1AA,
           0xFF00526B,
-          0xFFB3261E);
+          0xFFB3261E,
+          0xFF8A6100);
   public static final Palette DARK =
       new Palette(
           0xFF1B1E22,
@@ -36,7 +37,8 @@ public final class Palette {
           0xFF1F242A,
           0xFF6B7480,
           0xFF8ED3F0,
-          0xFFFF8A80);
+          0xFFFF8A80,
+          0xFFE0B050);
 
   private final Map<Role, Look> looks = new EnumMap<>(Role.class);
   private final int paper;
@@ -53,7 +55,8 @@ public final class Palette {
       int bolt,
       int hatch,
       int accent,
-      int alarm) {
+      int alarm,
+      int caution) {
     this.paper = paper;
     put(Role.PAPER, new Look(0, 0, paper));
     put(Role.LAYER_BODY, new Look(0, 0, layer));
@@ -86,6 +89,14 @@ public final class Palette {
     put(Role.SCALE_TEXT, new Look(quiet, 0.2, 0));
     put(Role.POINT, new Look(ink, 0.35, paper));
     put(Role.POINT_CHOSEN, new Look(ink, 0.35, ink));
+    put(Role.PRELOAD_BAND, new Look(0, 0, faded(accent, 0x48)));
+    put(Role.RUNG, new Look(ink, 0.35, 0));
+    put(Role.RUNG_BOLT, new Look(caution, 0.45, 0));
+    put(Role.RUNG_PRELOAD, new Look(accent, 0.45, 0));
+    put(Role.BOLT_LINE, new Look(ink, 0.45, 0));
+    put(Role.MEMBERS_LINE, new Look(accent, 0.45, 0, 1.9, 0.8));
+    put(Role.BOLT_LINE_FAINT, new Look(faded(ink, 0x70), 0.2, 0));
+    put(Role.MEMBERS_LINE_FAINT, new Look(faded(accent, 0x90), 0.2, 0, 1.9, 0.8));
     put(Role.SELECTION, new Look(accent, 0.55, 0));
     put(Role.GRIP, new Look(accent, 0.5, paper));
     put(Role.HOT, new Look(accent, 0.8, 0));

@@ -128,27 +128,14 @@ class SectionFigureTest {
             .filter(text -> text.tag().part().isElement())
             .toList();
     for (int i = 0; i < texts.size(); i++) {
-      double[] a = box(texts.get(i));
+      double[] a = Geometry.box(texts.get(i));
       assertTrue(a[0] >= 0 && a[2] <= WIDTH && a[1] >= 0 && a[3] <= HEIGHT, texts.get(i).text());
       for (int j = 0; j < i; j++) {
-        double[] b = box(texts.get(j));
+        double[] b = Geometry.box(texts.get(j));
         boolean apart = a[0] >= b[2] || b[0] >= a[2] || a[1] >= b[3] || b[1] >= a[3];
         assertTrue(apart, texts.get(i).text() + " over " + texts.get(j).text());
       }
     }
-  }
-
-  /** Left, top, right, bottom; letters reach about 0.73 above and 0.2 below the base line. */
-  private static double[] box(Mark.Text text) {
-    double width = TextWidth.of(text.text(), text.size(), text.weight());
-    double left =
-        switch (text.anchor()) {
-          case START -> text.at().x();
-          case MIDDLE -> text.at().x() - width / 2;
-          case END -> text.at().x() - width;
-        };
-    double base = text.at().y();
-    return new double[] {left, base - 0.73 * text.size(), left + width, base + 0.2 * text.size()};
   }
 
   @Test

@@ -26,6 +26,11 @@ record Found(Joint joint, Solved solved, Numbers numbers, int loadCase) {
     return solved.cases().get(loadCase);
   }
 
+  /** The temperature state that the load case meets. */
+  int state() {
+    return solved.preload().state(joint.service().loads().get(loadCase));
+  }
+
   Element element(int index) {
     return joint.elements().get(index);
   }

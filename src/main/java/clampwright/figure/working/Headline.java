@@ -7,5 +7,6 @@ public enum Headline {
   LOAD_FACTOR,
   PARTING_LOAD,
   BOLT_LOAD,
-  CLAMP_LOAD
+  CLAMP_LOAD,
+  PRELOAD
 }

@@ -50,6 +50,40 @@ record Numbers(UnitSystem units) {
     return put(Dimension.ANGLE, radians) + "°";
   }
 
+  String stress(double megapascals) {
+    return put(Dimension.STRESS, megapascals);
+  }
+
+  /** A torque such that divided by a length it is a force: N·m over mm, lbf·in over in. */
+  String torque(double newtonMillimetres) {
+    double inch = Quantities.inside(Dimension.LENGTH, UnitSystem.INCH, 1);
+    double shown =
+        units == UnitSystem.METRIC
+            ? newtonMillimetres / 1000
+            : newtonMillimetres / inch / Quantities.inside(Dimension.FORCE, UnitSystem.INCH, 1);
+    return plain(shown);
+  }
+
+  /** A stiffness such that times a length it is a force: kN/mm, lbf/in. */
+  String stiffnessOfForce(double newtonsPerMillimetre) {
+    double shown = Quantities.shown(Dimension.STIFFNESS, units, newtonsPerMillimetre);
+    return plain(units == UnitSystem.METRIC ? shown : 1e6 * shown);
+  }
+
+  /** A coefficient of expansion [1/K] in 10⁻⁶/K. */
+  String expansion(double perKelvin) {
+    return plain(1e6 * perKelvin);
+  }
+
+  /** A number that has no unit to be converted. */
+  String plain(double value) {
+    return put(Dimension.RATIO, value);
+  }
+
+  String stressResult(double megapascals) {
+    return result(Dimension.STRESS, megapascals);
+  }
+
   /** A length with as many more figures as it takes when one so near is taken from it. */
   String length(double millimetres, double gap) {
     return put(Dimension.LENGTH, millimetres, figures(millimetres, gap));
@@ -108,7 +142,7 @@ record Numbers(UnitSystem units) {
 
   /** A share in per cent, to a tenth. */
   String percent(double share) {
-    return String.format(Locale.ROOT, "%.1f %%", 100 * share);
+    return Double.isFinite(share) ? String.format(Locale.ROOT, "%.1f %%", 100 * share) : BEYOND;
   }
 
   /** Springs in series, 1/(1/k₁ + 1/k₂ + …). */

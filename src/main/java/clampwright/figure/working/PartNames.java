@@ -17,6 +17,7 @@ final class PartNames {
       case HEAD_CONE -> "Head's cone";
       case NUT_CONE -> joint.fastener().isTapped() ? "Lower cone" : "Nut's cone";
       case LOAD -> "Load";
+      case PRELOAD -> "Preload";
       case ELEMENT -> element(joint, part.index());
     };
   }

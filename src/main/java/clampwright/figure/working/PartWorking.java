@@ -11,6 +11,7 @@ record PartWorking(Found found) {
       case JOINT -> of(Headline.MEMBERS);
       case SHANK -> of(Headline.BOLT);
       case LOAD -> of(Headline.BOLT_LOAD);
+      case PRELOAD -> of(Headline.PRELOAD);
       case HEAD, HEAD_CONE -> new FaceWorking(found, Side.HEAD).working();
       case ANCHOR, NUT_CONE -> new FaceWorking(found, Side.NUT).working();
       case ELEMENT ->
@@ -24,6 +25,7 @@ record PartWorking(Found found) {
     return switch (headline) {
       case MEMBERS -> new MembersWorking(found).working();
       case BOLT -> new BoltWorking(found).working();
+      case PRELOAD -> new PreloadWorking(found).working();
       case LOAD_FACTOR -> new SharingWorking(found).loadFactor();
       case PARTING_LOAD -> new SharingWorking(found).partingLoad();
       case BOLT_LOAD -> new SharingWorking(found).boltLoad();

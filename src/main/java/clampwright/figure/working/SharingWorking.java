@@ -46,8 +46,8 @@ record SharingWorking(Found found) {
     LoadSharing sharing = sharing();
     Step parting =
         new Step(
-            "Parts at",
-            "F_p/(1 − Φ), pulling loads only",
+            "Parts at, least",
+            "F_min/(1 − Φ), pulling loads only",
             numbers.force(sharing.preload().min())
                 + " / (1 − "
                 + numbers.ratio(sharing.loadFactor(), 1 - sharing.loadFactor())
@@ -58,11 +58,17 @@ record SharingWorking(Found found) {
   }
 
   Working boltLoad() {
-    return withNotices("Bolt load", chosenFactor(), boltStep(), clampStep());
+    return withNotices(
+        "Bolt load", chosenFactor(), boltStep("Bolt load, most F_b", sharing().preload().max()));
   }
 
   Working clampLoad() {
-    return withNotices("Clamp load", chosenFactor(), boltStep(), clampStep());
+    double least = sharing().preload().min();
+    return withNotices(
+        "Clamp load",
+        chosenFactor(),
+        boltStep("Bolt load with the least preload F_b", least),
+        clampStep(sharing().boltLoad(least, sharing().axialMax())));
   }
 
   private Working withNotices(String title, Step... steps) {
@@ -76,30 +82,26 @@ record SharingWorking(Found found) {
     return factor("Load factor Φ, " + Sentences.method(chosen), chosen);
   }
 
-  private Step boltStep() {
+  private Step boltStep(String label, double preload) {
     Numbers numbers = found.numbers();
     LoadSharing sharing = sharing();
     String axial = numbers.force(sharing.axialMax());
     return new Step(
-        "Bolt load F_b",
+        label,
         "max(F_p + Φ·F_A, F_A, 0)",
         "max(%s + %s × %s, %s, 0)"
-            .formatted(
-                numbers.force(sharing.preload().max()),
-                numbers.ratio(sharing.loadFactor()),
-                axial,
-                axial),
-        numbers.forceResult(sharing.boltLoad()),
+            .formatted(numbers.force(preload), numbers.ratio(sharing.loadFactor()), axial, axial),
+        numbers.forceResult(sharing.boltLoad(preload, sharing.axialMax())),
         Source.SHARING);
   }
 
-  private Step clampStep() {
+  private Step clampStep(double bolt) {
     Numbers numbers = found.numbers();
     LoadSharing sharing = sharing();
     return new Step(
-        "Clamp load F_c",
+        "Clamp load, least F_c",
         "F_b − F_A",
-        numbers.force(sharing.boltLoad()) + " − " + numbers.force(sharing.axialMax()),
+        numbers.force(bolt) + " − " + numbers.force(sharing.axialMax()),
         numbers.forceResult(sharing.clampLoad()),
         Source.EQUILIBRIUM);
   }

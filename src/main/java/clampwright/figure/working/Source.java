@@ -15,6 +15,11 @@ final class Source {
   static final String VDI = "VDI 2230-1, from memory";
   static final String WILEMAN = "Wileman, Choudhury, Green 1991; constants partly from memory";
   static final String SHARING = "Shigley ch. 8; n as in VDI 2230-1, from memory";
+  static final String TORQUE = "ISO 16047, VDI 2230-1, from memory";
+  static final String NUT_FACTOR = "Shigley eq. 8-27";
+  static final String EMBEDDING = "VDI 2230-1 table 5, from memory";
+  static final String RELAXATION = "NASA-STD-5020B, from memory";
+  static final String EXPANSION = "free expansion against springs in series";
   static final String EQUILIBRIUM = "equilibrium";
 
   private Source() {}

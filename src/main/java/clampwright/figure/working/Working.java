@@ -6,6 +6,7 @@ import clampwright.joint.Part;
 import clampwright.mechanics.Assessment;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.Assessment.Unsolved;
+import clampwright.mechanics.checks.Verdict;
 import clampwright.quantity.UnitSystem;
 import java.util.List;
 
@@ -39,6 +40,22 @@ public record Working(String title, List<Step> steps) {
     return assessment instanceof Solved solved
         ? new PartWorking(new Found(joint, solved, new Numbers(units), loadCase)).of(headline)
         : unsolved(joint, (Unsolved) assessment, units);
+  }
+
+  /** The working of a check; why it does not apply where it has no margin. */
+  public static Working of(Verdict verdict, Joint joint, Assessment assessment, UnitSystem units) {
+    if (!(assessment instanceof Solved solved)) {
+      return unsolved(joint, (Unsolved) assessment, units);
+    }
+    if (verdict instanceof Verdict.Judged judged) {
+      int loadCase = Math.max(0, judged.where().loadCase());
+      Found found = new Found(joint, solved, new Numbers(units), loadCase);
+      return new CheckWorking(found, judged).working();
+    }
+    Verdict.NotApplicable not = (Verdict.NotApplicable) verdict;
+    return new Working(
+        "Check: " + Sentences.check(not.kind()),
+        List.of(Step.remark("Not applicable", not.why().text(), not.kind().source())));
   }
 
   private static Working unsolved(Joint joint, Unsolved unsolved, UnitSystem units) {

@@ -1,14 +1,21 @@
 package clampwright.view.found;
 
 import clampwright.edit.SketchModel;
+import clampwright.figure.LoadLadderFigure;
+import clampwright.figure.MethodSpreadFigure;
 import clampwright.figure.Sentences;
 import clampwright.figure.working.Headline;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
+import clampwright.joint.StiffnessMethod;
 import clampwright.mechanics.Assessment;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.Assessment.Unsolved;
+import clampwright.mechanics.checks.CheckKind;
+import clampwright.quantity.Dimension;
+import clampwright.quantity.Quantities;
 import clampwright.quantity.UnitSystem;
+import clampwright.view.FigurePlace;
 import clampwright.view.Headings;
 import clampwright.view.OncePerPulse;
 import clampwright.view.PartName;
@@ -19,6 +26,8 @@ import java.util.function.Consumer;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.GridPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 
@@ -26,7 +35,12 @@ import javafx.scene.layout.VBox;
 public final class FoundPane extends ScrollPane {
   private final SketchModel model;
   private final Map<Finding, Readout> readouts = new EnumMap<>(Finding.class);
-  private final MethodSpread spread = new MethodSpread();
+  private final FigurePlace spread =
+      new FigurePlace("Load factor by method; the list below has the numbers").tall(50);
+  private final FigurePlace ladder =
+      new FigurePlace("Load ladder: preload, bolt load, limits and parting on one axis").tall(150);
+  private final Label ladderUnit = new Label();
+  private final CheckList checks;
   private final MethodList methods = new MethodList();
   private final Region noticeRule = rule();
   private final Remarks notices;
@@ -38,9 +52,14 @@ public final class FoundPane extends ScrollPane {
    * The pane.
    *
    * @param openWorking what pressing a readout does
+   * @param openCheck what pressing a check does
    */
-  public FoundPane(SketchModel model, Consumer<Headline> openWorking) {
+  public FoundPane(
+      SketchModel model, Consumer<Headline> openWorking, Consumer<CheckKind> openCheck) {
     this.model = model;
+    checks = new CheckList(openCheck);
+    spread.getStyleClass().add("method-spread");
+    ladder.setId("load-ladder");
     getStyleClass().add("found");
     notices = new Remarks(this::nameOf, model.selectionProperty()::set);
     notices.setId("notices");
@@ -54,7 +73,20 @@ public final class FoundPane extends ScrollPane {
     solvedSheet
         .getChildren()
         .addAll(
-            readoutGrid(), rule(), heading("Φ by method"), spread, methods, noticeRule, notices);
+            readoutGrid(),
+            noticeRule,
+            notices,
+            rule(),
+            heading("Φ by method"),
+            spread,
+            rule(),
+            headed("Load ladder", ladderUnit),
+            ladder,
+            rule(),
+            headed("Checks", new Label("margin")),
+            checks,
+            rule(),
+            methods);
     solvedSheet.getStyleClass().add("solved");
     Label none = new Label("No solution yet");
     none.getStyleClass().add("no-solution");
@@ -101,6 +133,13 @@ public final class FoundPane extends ScrollPane {
     return heading;
   }
 
+  private static HBox headed(String text, Label right) {
+    right.getStyleClass().add("method-head");
+    Region gap = new Region();
+    HBox.setHgrow(gap, Priority.ALWAYS);
+    return new HBox(heading(text), gap, right);
+  }
+
   private void follow() {
     Sketch sketch = model.sketch();
     Assessment assessment = model.assessment();
@@ -121,10 +160,17 @@ public final class FoundPane extends ScrollPane {
     int shown = model.loadCase();
     double introduction = solved.cases().get(shown).introduction();
     readouts.forEach((finding, readout) -> readout.show(finding.of(solved, shown), sketch.units()));
-    spread.show(solved.members(), sketch.joint().method().stiffness(), introduction);
-    methods.show(
-        solved.members(), sketch.joint().method().stiffness(), introduction, sketch.units());
+    StiffnessMethod chosen = sketch.joint().method().stiffness();
+    spread.show(
+        (width, height) ->
+            MethodSpreadFigure.of(solved.members(), chosen, introduction, width, height));
+    ladder.show((width, height) -> LoadLadderFigure.of(sketch, solved, shown, width, height));
+    ladderUnit.setText(Quantities.unit(Dimension.FORCE, sketch.units()));
+    checks.show(model.verdicts(), sketch.joint());
+    methods.show(solved.members(), chosen, introduction, sketch.units());
     noticeRule.setVisible(!solved.notices().isEmpty());
+    noticeRule.setManaged(noticeRule.isVisible());
+    notices.setManaged(noticeRule.isVisible());
     notices.show(
         solved.notices().stream()
             .map(notice -> new Remark(notice.part(), Sentences.notice(notice)))

@@ -15,6 +15,7 @@ public final class GivenPane extends ScrollPane {
 
   private final SketchModel model;
   private final Section fastener;
+  private final Section tightening;
   private final Section load;
   private final Section method;
   private final Section part;
@@ -23,12 +24,11 @@ public final class GivenPane extends ScrollPane {
     this.model = model;
     getStyleClass().add("given");
     fastener = new FastenerSection(model);
+    tightening = new TighteningSection(model);
     load = new LoadSection(model);
     method = new MethodSection(model);
     part = new PartSection(model);
-    VBox sheet =
-        new VBox(
-            Headings.pane("Given"), fastener, new TighteningSection(model), load, method, part);
+    VBox sheet = new VBox(Headings.pane("Given"), fastener, tightening, load, method, part);
     sheet.getStyleClass().add("sheet");
     setContent(sheet);
     setFitToWidth(true);
@@ -41,7 +41,7 @@ public final class GivenPane extends ScrollPane {
   /** Marks the section with the selected part's fields, and scrolls to it if need be. */
   private void reveal() {
     Optional<Section> chosen = section(model.selection());
-    for (Section section : List.of(fastener, load, method, part)) {
+    for (Section section : List.of(fastener, tightening, load, method, part)) {
       section.pseudoClassStateChanged(CHOSEN, chosen.equals(Optional.of(section)));
     }
     if (getScene() != null && !isFocusWithin()) {
@@ -55,6 +55,7 @@ public final class GivenPane extends ScrollPane {
       case HEAD, SHANK, ANCHOR -> Optional.of(fastener);
       case HEAD_CONE, NUT_CONE -> Optional.of(method);
       case LOAD -> Optional.of(load);
+      case PRELOAD -> Optional.of(tightening);
       case ELEMENT -> Optional.of(part);
     };
   }

@@ -40,6 +40,7 @@ public final class PartCards {
       case ANCHOR -> anchor();
       case HEAD_CONE, NUT_CONE -> cones();
       case LOAD -> load();
+      case PRELOAD -> preload();
       case JOINT -> throw new IllegalArgumentException("the joint as a whole has no card");
     };
   }
@@ -103,6 +104,12 @@ public final class PartCards {
             "Angle at the nut", Fields.quantity(model, "card-nut-angle", AngleFields.nut()));
     showWhile(head, AngleFields::isTyped);
     showWhile(nut, AngleFields::isTyped);
+    return section;
+  }
+
+  private Section preload() {
+    Section section = new Section("Tightening");
+    section.add("Preload", Fields.quantity(model, "card-preload", TighteningSection.preload()));
     return section;
   }
 

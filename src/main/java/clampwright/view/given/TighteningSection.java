@@ -13,7 +13,7 @@ final class TighteningSection extends Section {
     add("Preload", Fields.quantity(model, "preload", preload()));
   }
 
-  private static SketchNumber preload() {
+  static SketchNumber preload() {
     return SketchNumber.required(
         "Preload",
         Dimension.FORCE,

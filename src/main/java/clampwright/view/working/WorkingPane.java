@@ -6,6 +6,8 @@ import clampwright.figure.working.Step;
 import clampwright.figure.working.Working;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
+import clampwright.mechanics.checks.CheckKind;
+import clampwright.mechanics.checks.Verdict;
 import clampwright.view.MathText;
 import clampwright.view.OncePerPulse;
 import java.util.ArrayList;
@@ -24,6 +26,8 @@ public final class WorkingPane extends ScrollPane {
   private final SketchModel model;
   private final ObjectProperty<Optional<Headline>> headline =
       new SimpleObjectProperty<>(this, "headline", Optional.empty());
+  private final ObjectProperty<Optional<CheckKind>> check =
+      new SimpleObjectProperty<>(this, "check", Optional.empty());
   private final MathText title = new MathText("working-title");
   private final VBox body = new VBox();
   private final List<StepLine> lines = new ArrayList<>();
@@ -38,7 +42,13 @@ public final class WorkingPane extends ScrollPane {
     setFitToWidth(true);
     setHbarPolicy(ScrollBarPolicy.NEVER);
     setAccessibleText("Working");
-    model.selectionProperty().subscribe((Part was, Part is) -> headline.set(Optional.empty()));
+    model
+        .selectionProperty()
+        .subscribe(
+            (Part was, Part is) -> {
+              headline.set(Optional.empty());
+              check.set(Optional.empty());
+            });
     OncePerPulse.keep(
         this,
         this::follow,
@@ -46,12 +56,21 @@ public final class WorkingPane extends ScrollPane {
         model.assessmentProperty(),
         model.selectionProperty(),
         model.shownCaseProperty(),
-        headline);
+        headline,
+        check);
   }
 
   /** Shows the working of a readout. */
   public void show(Headline wanted) {
+    check.set(Optional.empty());
     headline.set(Optional.of(wanted));
+    setVvalue(0);
+  }
+
+  /** Shows the working of a check. */
+  public void show(CheckKind wanted) {
+    headline.set(Optional.empty());
+    check.set(Optional.of(wanted));
     setVvalue(0);
   }
 
@@ -72,6 +91,11 @@ public final class WorkingPane extends ScrollPane {
 
   private Working working() {
     Sketch sketch = model.sketch();
+    List<Verdict> verdicts = model.verdicts();
+    if (check.get().isPresent() && !verdicts.isEmpty()) {
+      Verdict verdict = verdicts.get(check.get().get().ordinal());
+      return Working.of(verdict, sketch.joint(), model.assessment(), sketch.units());
+    }
     return headline
         .get()
         .map(

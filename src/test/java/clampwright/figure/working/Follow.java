@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import clampwright.joint.Joint;
 import clampwright.joint.Part;
 import clampwright.mechanics.Assessment;
+import clampwright.mechanics.checks.Checks;
 import clampwright.quantity.UnitSystem;
 import java.util.ArrayList;
 import java.util.List;
@@ -21,9 +22,20 @@ final class Follow {
     for (Headline headline : Headline.values()) {
       workings.add(Working.of(headline, joint, assessment, units, 0));
     }
+    if (assessment instanceof Assessment.Solved solved) {
+      Checks.of(joint, solved)
+          .forEach(verdict -> workings.add(Working.of(verdict, joint, assessment, units)));
+    }
     List<Part> parts =
         new ArrayList<>(
-            List.of(Part.JOINT, Part.HEAD, Part.SHANK, Part.ANCHOR, Part.LOAD, Part.HEAD_CONE));
+            List.of(
+                Part.JOINT,
+                Part.HEAD,
+                Part.SHANK,
+                Part.ANCHOR,
+                Part.LOAD,
+                Part.PRELOAD,
+                Part.HEAD_CONE));
     parts.add(Part.NUT_CONE);
     for (int i = 0; i < joint.elements().size(); i++) {
       parts.add(Part.element(i));

@@ -1,0 +1,2 @@
+/** The joint diagram in the drawer. */
+package clampwright.view.diagram;
