@@ -14,9 +14,13 @@ public final class Benches {
       case "assessment" -> org.openjdk.jmh.Main.main(new String[] {"AssessmentBench"});
       case "frame" -> FrameBench.run();
       case "startup" -> StartupBench.run();
+      case "spread" -> SpreadBench.run();
       default ->
           throw new IllegalArgumentException(
-              "no benchmark is called '" + name + "'; there are: assessment, frame, startup");
+              "no benchmark is called '"
+                  + name
+                  + "'; there are: assessment, frame, startup,"
+                  + " spread");
     }
   }
 }

@@ -1,0 +1,2 @@
+/** Which number matters: inputs that stray, alone and together. */
+package clampwright.mechanics.spread;
