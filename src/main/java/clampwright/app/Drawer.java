@@ -90,7 +90,7 @@ final class Drawer extends VBox {
   void add(String title, Supplier<Node> content) {
     ToggleButton button = new ToggleButton(title);
     button.getStyleClass().setAll("drawer-tab");
-    button.setId("tab-" + title.toLowerCase(java.util.Locale.ROOT));
+    button.setId("tab-" + title.toLowerCase(java.util.Locale.ROOT).replace(' ', '-'));
     button.setAccessibleRole(AccessibleRole.TAB_ITEM);
     button.setToggleGroup(group);
     Node[] made = {null};

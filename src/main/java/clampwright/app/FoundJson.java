@@ -42,6 +42,7 @@ final class FoundJson {
     addLoads(root, solved);
     root.add("loadCases", loadCases(joint, solved));
     root.add("checks", ChecksJson.of(joint, Checks.of(joint, solved)));
+    root.add("sensitivity", SensitivityJson.of(joint));
     root.add("notices", notices(joint, solved));
     root.addProperty("caution", Sentences.CAUTION);
     return GSON.toJson(root) + "\n";

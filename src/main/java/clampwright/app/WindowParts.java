@@ -3,10 +3,12 @@ package clampwright.app;
 import clampwright.edit.SketchModel;
 import clampwright.figure.working.Headline;
 import clampwright.mechanics.checks.CheckKind;
+import clampwright.mechanics.spread.Sensitivity;
 import clampwright.view.diagram.JointDiagramPane;
 import clampwright.view.found.FoundPane;
 import clampwright.view.given.GivenPane;
 import clampwright.view.schedule.SchedulePane;
+import clampwright.view.spread.SpreadPane;
 import clampwright.view.working.WorkingPane;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Node;
@@ -56,12 +58,18 @@ final class WindowParts {
     working.show(check);
   }
 
+  private void openBar(Sensitivity.Bar bar) {
+    drawer.show("Working");
+    working.show(bar);
+  }
+
   /** The drawer with its tabs. */
   Node drawerNode() {
     working = new WorkingPane(model);
     drawer = new Drawer(settings.values().drawerHeight);
     drawer.add("Schedule", () -> new SchedulePane(model));
     drawer.add("Working", () -> working);
+    drawer.add("What matters", () -> new SpreadPane(model, this::openBar));
     drawer.add("Joint diagram", () -> new JointDiagramPane(model));
     drawer.show("Schedule");
     drawer.openProperty().set(settings.values().drawerOpen);

@@ -61,6 +61,9 @@ public enum Role {
   MEMBERS_LINE,
   BOLT_LINE_FAINT,
   MEMBERS_LINE_FAINT,
+  /** A bin of a histogram whose joints hold, or fail. */
+  BIN_HOLDS,
+  BIN_FAILS,
   /** Frame of the selected part; its grips; what lies under the pointer; an insertion grip. */
   SELECTION,
   GRIP,

@@ -97,6 +97,8 @@ public final class Palette {
     put(Role.MEMBERS_LINE, new Look(accent, 0.45, 0, 1.9, 0.8));
     put(Role.BOLT_LINE_FAINT, new Look(faded(ink, 0x70), 0.2, 0));
     put(Role.MEMBERS_LINE_FAINT, new Look(faded(accent, 0x90), 0.2, 0, 1.9, 0.8));
+    put(Role.BIN_HOLDS, new Look(0, 0, faded(accent, 0x90)));
+    put(Role.BIN_FAILS, new Look(0, 0, alarm));
     put(Role.SELECTION, new Look(accent, 0.55, 0));
     put(Role.GRIP, new Look(accent, 0.5, paper));
     put(Role.HOT, new Look(accent, 0.8, 0));

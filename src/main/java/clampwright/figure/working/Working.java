@@ -7,6 +7,7 @@ import clampwright.mechanics.Assessment;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.Assessment.Unsolved;
 import clampwright.mechanics.checks.Verdict;
+import clampwright.mechanics.spread.Sensitivity;
 import clampwright.quantity.UnitSystem;
 import java.util.List;
 
@@ -56,6 +57,11 @@ public record Working(String title, List<Step> steps) {
     return new Working(
         "Check: " + Sentences.check(not.kind()),
         List.of(Step.remark("Not applicable", not.why().text(), not.kind().source())));
+  }
+
+  /** How a margin moves with an input at its limits. */
+  public static Working of(Sensitivity.Bar bar, Joint joint, UnitSystem units) {
+    return new StrayingWorking(bar, joint, units).working();
   }
 
   private static Working unsolved(Joint joint, Unsolved unsolved, UnitSystem units) {

@@ -8,9 +8,11 @@ import clampwright.mechanics.checks.Verdict;
 import java.util.Optional;
 
 /**
- * Which margin is asked about: that of one check, or the least of all.
+ * Which margin is asked about: that of one check, or the least of all that loads and preload
+ * decide. Thread stripping compares the threads with the bolt itself, which no load moves; in the
+ * least margin it would hide the rest.
  *
- * @param check the check; empty for the least margin
+ * @param check the check; empty for the least margin under load
  */
 public record Margin(Optional<CheckKind> check) {
   public static final Margin WORST = new Margin(Optional.empty());
@@ -33,7 +35,9 @@ public record Margin(Optional<CheckKind> check) {
   }
 
   private boolean isAskedFor(Verdict.Judged judged) {
-    return check.isEmpty() || check.get() == judged.kind();
+    return check.isEmpty()
+        ? judged.kind() != CheckKind.THREAD_STRIPPING
+        : check.get() == judged.kind();
   }
 
   /** The margin; NaN without a solution or a margin. Inside this package only. */

@@ -26,7 +26,7 @@ public final class MonteCarlo {
   private final long seed;
   private final double[] margins;
   private final AtomicInteger next = new AtomicInteger();
-  private final AtomicReference<RuntimeException> failure = new AtomicReference<>();
+  private final AtomicReference<Throwable> failure = new AtomicReference<>();
   private final BooleanSupplier cancelled;
 
   private MonteCarlo(Joint joint, Margin margin, int count, long seed, BooleanSupplier cancelled) {
@@ -76,7 +76,7 @@ public final class MonteCarlo {
       executor.shutdownNow();
     }
     if (failure.get() != null) {
-      throw failure.get();
+      throw new IllegalStateException("a random joint could not be drawn", failure.get());
     }
     return soFar();
   }
@@ -88,7 +88,7 @@ public final class MonteCarlo {
           block = next.getAndIncrement()) {
         draw(block);
       }
-    } catch (RuntimeException unexpected) {
+    } catch (RuntimeException | Error unexpected) {
       failure.compareAndSet(null, unexpected);
     } finally {
       ended.countDown();

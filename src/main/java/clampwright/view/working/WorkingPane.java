@@ -8,6 +8,7 @@ import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.checks.CheckKind;
 import clampwright.mechanics.checks.Verdict;
+import clampwright.mechanics.spread.Sensitivity;
 import clampwright.view.MathText;
 import clampwright.view.OncePerPulse;
 import java.util.ArrayList;
@@ -28,6 +29,8 @@ public final class WorkingPane extends ScrollPane {
       new SimpleObjectProperty<>(this, "headline", Optional.empty());
   private final ObjectProperty<Optional<CheckKind>> check =
       new SimpleObjectProperty<>(this, "check", Optional.empty());
+  private final ObjectProperty<Optional<Sensitivity.Bar>> bar =
+      new SimpleObjectProperty<>(this, "bar", Optional.empty());
   private final MathText title = new MathText("working-title");
   private final VBox body = new VBox();
   private final List<StepLine> lines = new ArrayList<>();
@@ -46,8 +49,7 @@ public final class WorkingPane extends ScrollPane {
         .selectionProperty()
         .subscribe(
             (Part was, Part is) -> {
-              headline.set(Optional.empty());
-              check.set(Optional.empty());
+              ask(Optional.empty(), Optional.empty(), Optional.empty());
             });
     OncePerPulse.keep(
         this,
@@ -57,20 +59,30 @@ public final class WorkingPane extends ScrollPane {
         model.selectionProperty(),
         model.shownCaseProperty(),
         headline,
-        check);
+        check,
+        bar);
   }
 
   /** Shows the working of a readout. */
   public void show(Headline wanted) {
-    check.set(Optional.empty());
-    headline.set(Optional.of(wanted));
-    setVvalue(0);
+    ask(Optional.of(wanted), Optional.empty(), Optional.empty());
   }
 
   /** Shows the working of a check. */
   public void show(CheckKind wanted) {
-    headline.set(Optional.empty());
-    check.set(Optional.of(wanted));
+    ask(Optional.empty(), Optional.of(wanted), Optional.empty());
+  }
+
+  /** Shows how a margin moves with an input. */
+  public void show(Sensitivity.Bar wanted) {
+    ask(Optional.empty(), Optional.empty(), Optional.of(wanted));
+  }
+
+  private void ask(
+      Optional<Headline> headline, Optional<CheckKind> check, Optional<Sensitivity.Bar> bar) {
+    this.headline.set(headline);
+    this.check.set(check);
+    this.bar.set(bar);
     setVvalue(0);
   }
 
@@ -95,6 +107,9 @@ public final class WorkingPane extends ScrollPane {
     if (check.get().isPresent() && !verdicts.isEmpty()) {
       Verdict verdict = verdicts.get(check.get().get().ordinal());
       return Working.of(verdict, sketch.joint(), model.assessment(), sketch.units());
+    }
+    if (bar.get().isPresent() && !verdicts.isEmpty()) {
+      return Working.of(bar.get().get(), sketch.joint(), sketch.units());
     }
     return headline
         .get()
