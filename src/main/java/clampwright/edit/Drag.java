@@ -14,7 +14,8 @@ import java.util.Optional;
  * <p>Positions are in mm of the joint: {@code fromAxis} signed, positive to the right; {@code z}
  * from under the head.
  */
-public sealed interface Drag permits LengthDrag, OrderDrag, FlankDrag, ShankDrag, LayerDrag {
+public sealed interface Drag
+    permits LengthDrag, OrderDrag, FlankDrag, ShankDrag, LayerDrag, ForceDrag, PlaneDrag {
 
   /**
    * Takes hold of a feature.
@@ -33,8 +34,24 @@ public sealed interface Drag permits LengthDrag, OrderDrag, FlankDrag, ShankDrag
       case BODY -> part.isElement() ? Optional.of(OrderDrag.of(sketch, part, grab)) : none();
       case FLANK -> FlankDrag.of(sketch, part, grab);
       case SHANK_EDGE -> ShankDrag.of(sketch, grab);
+      case PRELOAD_SIZE -> ForceDrag.preload(sketch, grab);
+      case LOAD_AT_HEAD, LOAD_AT_NUT, LOAD_ENTERS, LOAD_LEAVES ->
+          load(sketch, 0, feature, fromAxis, z);
       case INSERT ->
           Optional.of(LayerDrag.at(sketch, Interfaces.above(sketch.joint(), part), grab));
+    };
+  }
+
+  /** Takes hold of the arrows of a load case, or of where its load enters or leaves. */
+  static Optional<Drag> load(
+      Sketch sketch, int loadCase, Feature feature, double fromAxis, double z) {
+    Grab grab = new Grab(fromAxis, z);
+    return switch (feature) {
+      case LOAD_AT_HEAD, LOAD_AT_NUT ->
+          Optional.of(ForceDrag.load(sketch, loadCase, feature == Feature.LOAD_AT_HEAD, grab));
+      case LOAD_ENTERS, LOAD_LEAVES ->
+          PlaneDrag.of(sketch, loadCase, feature == Feature.LOAD_ENTERS);
+      default -> none();
     };
   }
 

@@ -31,16 +31,23 @@ final class Handles {
   private void hot(Tag hot) {
     List<Mark> traced = new ArrayList<>();
     for (Mark mark : drawing.marks()) {
-      if (mark instanceof Mark.Path path
-          && path.tag().part().equals(hot.part())
-          && hot.feature().isPresent()
-          && path.tag().feature().equals(hot.feature())) {
+      if (mark instanceof Mark.Arrow arrow && isOf(arrow, hot)) {
+        Tag traces = new Tag(Role.HOT, hot.part(), hot.feature());
+        traced.add(new Mark.Path(traces, List.of(arrow.from(), arrow.to()), false));
+      }
+      if (mark instanceof Mark.Path path && isOf(path, hot)) {
         traced.add(
             new Mark.Path(
                 new Tag(Role.HOT, hot.part(), hot.feature()), path.points(), path.closed()));
       }
     }
     traced.forEach(drawing::add);
+  }
+
+  private static boolean isOf(Mark mark, Tag hot) {
+    return mark.tag().part().equals(hot.part())
+        && hot.feature().isPresent()
+        && mark.tag().feature().equals(hot.feature());
   }
 
   private void selection(int i) {

@@ -33,7 +33,8 @@ public final class HitTest {
   }
 
   private static boolean isDraggable(Mark mark) {
-    boolean line = mark instanceof Mark.Path || mark instanceof Mark.Disc;
+    boolean line =
+        mark instanceof Mark.Path || mark instanceof Mark.Disc || mark instanceof Mark.Arrow;
     return line && mark.tag().feature().isPresent() && mark.role() != Role.HOT;
   }
 
@@ -54,6 +55,9 @@ public final class HitTest {
     if (mark instanceof Mark.Disc disc) {
       double away = Math.hypot(disc.centre().x() - point.x(), disc.centre().y() - point.y());
       return Math.max(0, away - disc.radius());
+    }
+    if (mark instanceof Mark.Arrow arrow) {
+      return toSegment(point, arrow.from(), arrow.to());
     }
     List<Point> points = ((Mark.Path) mark).points();
     double best = Double.POSITIVE_INFINITY;

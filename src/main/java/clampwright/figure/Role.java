@@ -43,8 +43,10 @@ public enum Role {
   NAME,
   SUBNAME,
   CAPTION,
-  /** The outside load. */
+  /** The outside load; where it acts; the preload. */
   LOAD,
+  LOAD_FOOT,
+  PRELOAD,
   /** Axis, ticks and labels of a scale; a point on it; the point of the method in force. */
   SCALE,
   SCALE_TEXT,

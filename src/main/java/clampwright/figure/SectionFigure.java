@@ -4,8 +4,6 @@ import clampwright.joint.LoadCase;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.mechanics.Assessment;
-import clampwright.quantity.Dimension;
-import clampwright.quantity.Quantities;
 import java.util.Optional;
 
 /** The cross-section: hand method on the left half, the matter on the right half. */
@@ -56,7 +54,7 @@ public final class SectionFigure {
     }
     new Dimensions(drawing, layout, sketch).draw();
     new EdgeDistances(drawing, layout, sketch, load(sketch, options)).draw();
-    load(drawing, layout, sketch, options);
+    new ForceDrawing(drawing, layout, sketch, load(sketch, options)).draw(options.interactive());
     captions(drawing);
     if (count == 0) {
       beginning(drawing, layout);
@@ -88,28 +86,8 @@ public final class SectionFigure {
     drawing.text(tag, x, y + 4.6, "to draw a layer", Mark.Anchor.START, 3.3);
   }
 
-  /** Arrows at head and nut that pull the joint apart, or push it together. */
   private static LoadCase load(Sketch sketch, Options options) {
     return sketch.joint().service().loads().get(options.loadCase());
-  }
-
-  private static void load(Drawing drawing, StackLayout layout, Sketch sketch, Options options) {
-    double axial = load(sketch, options).axialMax();
-    if (axial == 0 || layout.stack() == 0) {
-      return;
-    }
-    Tag tag = Tag.of(Role.LOAD, Part.LOAD);
-    double x = drawing.sheet().x(0.72 * layout.reach());
-    double top = drawing.sheet().y(0) - 1.5;
-    double bottom = drawing.sheet().y(layout.stack()) + 1.5;
-    boolean pull = axial > 0;
-    drawing.add(new Mark.Arrow(tag, new Point(x, top), new Point(x, top - 9), !pull, pull));
-    drawing.add(new Mark.Arrow(tag, new Point(x, bottom), new Point(x, bottom + 9), !pull, pull));
-    String text = Quantities.text(Dimension.FORCE, sketch.units(), Math.abs(axial));
-    double rim = drawing.sheet().x(layout.joint().fastener().head().rim() / 2);
-    boolean room = x - rim > TextWidth.of(text, 3.3, Mark.Weight.BOLD) + 4;
-    Mark.Anchor anchor = room ? Mark.Anchor.END : Mark.Anchor.START;
-    drawing.text(tag, room ? x - 2 : x + 2, top - 5, text, anchor, 3.3, Mark.Weight.BOLD);
   }
 
   /** The sheet of this size on which the whole joint and its call-outs fit. */

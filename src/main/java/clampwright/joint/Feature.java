@@ -17,5 +17,15 @@ public enum Feature {
   /** The edge of the shank: steps the thread size. */
   SHANK_EDGE,
   /** The grip at an interface that inserts a layer; the part is the element below it. */
-  INSERT
+  INSERT,
+  /** The load arrow at the head: drags the axial load. */
+  LOAD_AT_HEAD,
+  /** The load arrow at the nut: drags the axial load. */
+  LOAD_AT_NUT,
+  /** Where the load enters: drags to another part. */
+  LOAD_ENTERS,
+  /** Where the load leaves: drags to another part. */
+  LOAD_LEAVES,
+  /** The preload arrow: drags the preload. */
+  PRELOAD_SIZE
 }

@@ -85,6 +85,8 @@ public final class Palette {
     put(Role.SUBNAME, new Look(quiet, 0.2, 0));
     put(Role.CAPTION, new Look(quiet, 0.2, 0));
     put(Role.LOAD, new Look(ink, 0.7, ink));
+    put(Role.LOAD_FOOT, new Look(ink, 0.4, paper));
+    put(Role.PRELOAD, new Look(accent, 0.5, accent));
     put(Role.SCALE, new Look(quiet, 0.25, 0));
     put(Role.SCALE_TEXT, new Look(quiet, 0.2, 0));
     put(Role.POINT, new Look(ink, 0.35, paper));

@@ -36,7 +36,7 @@ public final class FoundPane extends ScrollPane {
   private final SketchModel model;
   private final Map<Finding, Readout> readouts = new EnumMap<>(Finding.class);
   private final FigurePlace spread =
-      new FigurePlace("Load factor by method; the list below has the numbers").tall(50);
+      new FigurePlace("Load factor by method; the list below has the numbers").tall(60);
   private final FigurePlace ladder =
       new FigurePlace("Load ladder: preload, bolt load, limits and parting on one axis").tall(150);
   private final Label ladderUnit = new Label();

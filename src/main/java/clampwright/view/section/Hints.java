@@ -47,6 +47,13 @@ final class Hints {
       case BODY -> "Drag " + name + " to change its place, double-click for its card.";
       case FLANK -> "Drag the flank to change the half-angle; it catches at 30° and 45°.";
       case SHANK_EDGE -> "Drag to step through the thread sizes; holes of the table follow.";
+      case LOAD_AT_HEAD, LOAD_AT_NUT ->
+          "Drag the arrow out or in to change the axial load, or type a number.";
+      case LOAD_ENTERS ->
+          "Drag to the part where the load enters; n follows from the parts between.";
+      case LOAD_LEAVES ->
+          "Drag to the part where the load leaves; n follows from the parts between.";
+      case PRELOAD_SIZE -> "Drag the arrow out or in to change the preload, or type a number.";
       case INSERT -> "Click to insert a layer here, or drag to draw its thickness.";
     };
   }

@@ -74,7 +74,10 @@ final class Press implements Gesture {
     if (tag.feature().isEmpty()) {
       return Optional.of(new PanGesture(pane, at));
     }
-    Optional<Drag> drag = Drag.start(model.sketch(), tag.part(), tag.feature().get(), x(), z());
+    Optional<Drag> drag =
+        tag.part().equals(Part.LOAD)
+            ? Drag.load(model.sketch(), model.loadCase(), tag.feature().get(), x(), z())
+            : Drag.start(model.sketch(), tag.part(), tag.feature().get(), x(), z());
     if (drag.isEmpty()) {
       pane.refuse(Hints.held(model.sketch(), tag));
     }

@@ -10,9 +10,11 @@ import clampwright.figure.Role;
 import clampwright.figure.Sheet;
 import clampwright.joint.Element;
 import clampwright.joint.Feature;
+import clampwright.joint.Introduction;
 import clampwright.joint.Outline;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
+import clampwright.joint.Target;
 import clampwright.view.Sketches;
 import java.util.List;
 import javafx.geometry.Point2D;
@@ -209,6 +211,60 @@ class GesturesTest {
     assertFalse(section.pane.value().isVisible());
     assertNotEquals(16, section.element(FLANGE).thickness());
     oneStep();
+  }
+
+  @Test
+  void theLoadArrowIsDraggedOut() {
+    robot
+        .drag(arrow(Feature.LOAD_AT_HEAD), MouseButton.PRIMARY)
+        .moveBy(0, -4)
+        .moveBy(0, -26)
+        .drop();
+    double axial = section.model.sketch().joint().service().loads().get(0).axialMax();
+    assertTrue(axial > 6_000, "load " + axial);
+    oneStep();
+  }
+
+  @Test
+  void theLoadIsDraggedToThePartItEntersAt() {
+    robot.drag(ring(Feature.LOAD_ENTERS), MouseButton.PRIMARY).moveBy(0, 4);
+    robot.moveTo(section.at(14, section.middle(SPACER))).drop();
+    assertEquals(
+        new Introduction.Planes(SPACER, FLANGE),
+        section.model.sketch().joint().service().loads().get(0).introduction());
+    oneStep();
+  }
+
+  @Test
+  void thePreloadArrowIsDraggedIn() {
+    robot.drag(arrow(Feature.PRELOAD_SIZE), MouseButton.PRIMARY).moveBy(0, 4).moveBy(0, 20).drop();
+    Target.Force force = (Target.Force) section.model.sketch().joint().tightening().target();
+    assertTrue(force.force() < 25_000, "preload " + force);
+    oneStep();
+  }
+
+  /** The middle of an arrow. */
+  private Point2D arrow(Feature feature) {
+    Mark.Arrow arrow =
+        section.pane.figure().marks().stream()
+            .filter(Mark.Arrow.class::isInstance)
+            .map(Mark.Arrow.class::cast)
+            .filter(mark -> mark.tag().feature().filter(feature::equals).isPresent())
+            .findFirst()
+            .orElseThrow();
+    double y = (arrow.from().y() + arrow.to().y()) / 2;
+    return section.screen(arrow.from().x(), y);
+  }
+
+  private Point2D ring(Feature feature) {
+    Mark.Disc disc =
+        section.pane.figure().marks().stream()
+            .filter(Mark.Disc.class::isInstance)
+            .map(Mark.Disc.class::cast)
+            .filter(mark -> mark.tag().feature().filter(feature::equals).isPresent())
+            .findFirst()
+            .orElseThrow();
+    return section.screen(disc.centre().x(), disc.centre().y());
   }
 
   private void oneStep() {
