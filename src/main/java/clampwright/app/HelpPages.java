@@ -45,6 +45,25 @@ final class HelpPages {
                 + " at its inner side with its outside diameter (common practice, no source)."
                 + " Otherwise the cone starts at the head's edge and fans through it. Either can"
                 + " be set per side."),
+        heading("Preload"),
+        paragraph(
+            "A force, a share of the proof load, or a torque, F = T/(K·d) or by the friction in"
+                + " thread and face (ISO 16047). Scatter to both sides; settling takes"
+                + " f_Z·k_b·k_m/(k_b + k_m), relaxation and creep a share of the least preload."
+                + " A temperature case changes it by the difference of free expansions times the"
+                + " same stiffness. The most credits no loss."),
+        heading("Checks"),
+        paragraph(
+            "Each is worked out for every load case at every temperature by every stiffness method"
+                + " that applies; what is shown is the worst, and it says which. Margins are there"
+                + " over asked less 1. Factors are 1.0 until set. The forms are those of VDI 2230,"
+                + " NASA-STD-5020B, EN 1993-1-8 and FED-STD-H28, largely from memory: each check's"
+                + " working says so. Check them against the edition that binds you."),
+        heading("What matters"),
+        paragraph(
+            "Every input with a stated tolerance goes to its limits alone; the bars show how far"
+                + " the margin moves. Random joints have all inputs off at once, normal with the"
+                + " limits at three deviations, half-angle and n even."),
         heading("Limits"),
         paragraph(
             "Concentric load, one bolt, elastic members; no prying, no gasket curve, no plate"
@@ -57,13 +76,13 @@ final class HelpPages {
   static Node about() {
     return text(
         heading("Clampwright"),
-        paragraph("Draw a bolted stack, see its pressure cones, read its stiffness."),
+        paragraph("Draw a bolted stack, see its pressure cones, read its margins."),
         paragraph(Sentences.CAUTION),
         paragraph(
             "Table values carry their source and how sure it is; rest the pointer on a field to"
                 + " see it. Some are from memory and say so."),
         paragraph(
-            "Built with OpenJFX, AtlantaFX, Gson, Apache Commons CSV, picocli and the Liberation"
+            "Built with OpenJFX, AtlantaFX, Gson, Apache Commons CSV, Statistics and RNG, picocli and the Liberation"
                 + " fonts, under their licences."));
   }
 

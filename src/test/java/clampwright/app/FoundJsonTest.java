@@ -30,13 +30,16 @@ class FoundJsonTest {
     JsonObject found = found("gearbox-lid");
     checkKeys(
         "name, angle, zone, elements, memberStiffness, chosenMethod, boltStiffness, loadFactor,"
-            + " preload, load, boltLoad, clampLoad, partingLoad, notices, caution",
+            + " preload, load, boltLoad, clampLoad, partingLoad, loadCases, checks,"
+            + " sensitivity, notices, caution",
         found);
     checkKeys("rule, headDegrees, nutDegrees", found.getAsJsonObject("angle"));
     checkKeys(
         "length, headFaceDiameter, nutFaceDiameter, headWasherRule, nutWasherRule",
         found.getAsJsonObject("zone"));
-    checkKeys("min, nominal, max", found.getAsJsonObject("preload"));
+    checkKeys(
+        "min, nominal, max, assembly, settling, relaxed, temperatures",
+        found.getAsJsonObject("preload"));
     checkKeys("axial", found.getAsJsonObject("load"));
     checkKeys(
         "midPlaneCylinders, fullFrusta, vdi2230, wileman",
@@ -65,11 +68,11 @@ class FoundJsonTest {
     checkNear(1_324_511.6126, found.getAsJsonObject("memberStiffness"), "midPlaneCylinders");
     checkNear(260_376.2874, found.get("boltStiffness"));
     checkNear(0.115000816, found.get("loadFactor"));
-    checkNear(22_000, found.getAsJsonObject("preload").get("nominal"));
+    checkNear(18_115.943127, found.getAsJsonObject("preload").get("nominal"));
     checkNear(6000, found.getAsJsonObject("load").get("axial"));
-    checkNear(22_690.0049, found.get("boltLoad"));
-    checkNear(16_690.0049, found.get("clampLoad"));
-    checkNear(24_858.7800, found.get("partingLoad"));
+    checkNear(31_719.912503, found.get("boltLoad"));
+    checkNear(6_199.551251, found.get("clampLoad"));
+    checkNear(13_005.149113, found.get("partingLoad"));
     JsonObject zone = found.getAsJsonObject("zone");
     checkNear(37.5, zone.get("length"));
     checkNear(14.63, zone.get("headFaceDiameter"));
@@ -78,6 +81,49 @@ class FoundJsonTest {
     checkNear(28.63, lid.get("effectiveDiameter"));
     checkNear(7, lid.get("depthFromHead"));
     checkNear(30.5, lid.get("depthFromNut"));
+  }
+
+  @Test
+  void thePreloadOfEveryTemperature() {
+    JsonObject preload = found("gearbox-lid").getAsJsonObject("preload");
+    checkNear(22_250.340841, preload.getAsJsonObject("assembly").get("nominal"));
+    checkNear(4_134.397713, preload.get("settling"));
+    List<String> names = new ArrayList<>();
+    preload
+        .getAsJsonArray("temperatures")
+        .forEach(state -> names.add(state.getAsJsonObject().get("name").getAsString()));
+    assertEquals(List.of("at assembly temperature", "Hot oil", "Cold start"), names);
+    JsonObject cold = preload.getAsJsonArray("temperatures").get(2).getAsJsonObject();
+    checkNear(11_509.546358, cold.get("min"));
+    checkNear(-1_488.818377, cold.get("change"));
+  }
+
+  @Test
+  void everyLoadCaseAndCheck() {
+    JsonObject found = found("gearbox-lid");
+    assertEquals(2, found.getAsJsonArray("loadCases").size());
+    JsonObject test = found.getAsJsonArray("loadCases").get(1).getAsJsonObject();
+    assertEquals("Pressure test", test.get("name").getAsString());
+    checkNear(9_000, test.get("axialMax"));
+    assertEquals(12, found.getAsJsonArray("checks").size());
+    JsonObject parting = found.getAsJsonArray("checks").get(4).getAsJsonObject();
+    checkKeys(
+        "name, case, temperature, method, demand, capacity, unit, factor, margin, source", parting);
+    assertEquals("parting", parting.get("name").getAsString());
+    assertEquals("Pressure test", parting.get("case").getAsString());
+    assertEquals("Cold start", parting.get("temperature").getAsString());
+    assertEquals(0.278838484, parting.get("margin").getAsDouble(), 1e-6);
+    JsonObject pressure = found.getAsJsonArray("checks").get(7).getAsJsonObject();
+    checkKeys("name, notApplicable", pressure);
+  }
+
+  /** Of all inputs with a tolerance the one that moves the margin most comes first. */
+  @Test
+  void theSensitivity() {
+    JsonObject first = found("gearbox-lid").getAsJsonArray("sensitivity").get(0).getAsJsonObject();
+    checkKeys("input, low, high, unit, marginAtLow, marginAtHigh", first);
+    assertEquals("preload at assembly", first.get("input").getAsString());
+    checkNear(-0.23, first.get("low"));
   }
 
   private static void checkNear(double expected, JsonObject members, String method) {
