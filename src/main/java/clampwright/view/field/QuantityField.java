@@ -44,6 +44,7 @@ public final class QuantityField extends StackPane implements Typed {
   private OptionalDouble before = OptionalDouble.empty();
   private UnitSystem units = UnitSystem.METRIC;
   private OptionalDouble automatic = OptionalDouble.empty();
+  private String open = "auto";
   private boolean typing;
   private boolean showing;
 
@@ -85,6 +86,12 @@ public final class QuantityField extends StackPane implements Typed {
   /** Shows what an empty field comes to [units inside the program]. */
   public void setAutomatic(OptionalDouble automatic) {
     this.automatic = automatic;
+    showPrompt();
+  }
+
+  /** Says what an empty field means where the program has no number for it. */
+  public void setOpen(String open) {
+    this.open = open;
     showPrompt();
   }
 
@@ -140,7 +147,7 @@ public final class QuantityField extends StackPane implements Typed {
     try {
       number.write().apply(model.sketch(), value);
     } catch (IllegalArgumentException refused) {
-      say(FieldText.refusal(refused));
+      say(FieldText.refusal(number.dimension(), refused));
       return false;
     }
     say("");
@@ -253,7 +260,7 @@ public final class QuantityField extends StackPane implements Typed {
         !number.optional()
             ? ""
             : automatic.isEmpty()
-                ? "auto"
+                ? open
                 : "auto " + FieldText.of(number.dimension(), units, automatic.getAsDouble()));
   }
 }
