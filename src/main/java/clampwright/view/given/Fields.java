@@ -6,6 +6,7 @@ import clampwright.edit.SketchModel;
 import clampwright.joint.Fastener;
 import clampwright.joint.Material;
 import clampwright.joint.Sketch;
+import clampwright.joint.Tightening;
 import clampwright.view.field.Choice;
 import clampwright.view.field.ChoiceField;
 import clampwright.view.field.QuantityField;
@@ -14,6 +15,7 @@ import clampwright.view.field.SketchNumber;
 import java.util.List;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
+import javafx.scene.control.Label;
 
 /** Makes the fields of the given pane, with their ids. */
 final class Fields {
@@ -31,6 +33,37 @@ final class Fields {
     ChoiceField<T> field = new ChoiceField<>(model, choice);
     field.setId(id);
     return field;
+  }
+
+  /** A field that may stay empty, and what it means then. */
+  static QuantityField optional(SketchModel model, String id, SketchNumber number, String open) {
+    QuantityField field = quantity(model, id, number);
+    field.setOpen(open);
+    return field;
+  }
+
+  /** A choice with long words, and so wider. */
+  static <T> ChoiceField<T> wideChoice(SketchModel model, String id, SketchChoice<T> choice) {
+    ChoiceField<T> field = choice(model, id, choice);
+    field.getStyleClass().add("wide-field");
+    return field;
+  }
+
+  /** A quiet line under fields that says what they come to. */
+  static Label hint(String id) {
+    Label hint = new Label();
+    hint.setId(id);
+    hint.getStyleClass().add("hint-line");
+    hint.setWrapText(true);
+    return hint;
+  }
+
+  static Sketch withTightening(Sketch sketch, UnaryOperator<Tightening> change) {
+    return sketch.withJoint(joint -> joint.withTightening(change.apply(joint.tightening())));
+  }
+
+  static Tightening tightening(Sketch sketch) {
+    return sketch.joint().tightening();
   }
 
   static Sketch withFastener(Sketch sketch, UnaryOperator<Fastener> change) {
