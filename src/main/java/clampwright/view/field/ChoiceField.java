@@ -68,9 +68,10 @@ public final class ChoiceField<T> extends Button {
 
   private void follow(Sketch sketch) {
     Optional<T> value = choice.read().apply(sketch);
-    if (!value.equals(held) || getText().isEmpty()) {
-      held = value;
-      setText(value.map(choice.label()).orElse(""));
+    String label = value.map(choice.label()).orElse("");
+    held = value;
+    if (!label.equals(getText())) {
+      setText(label);
       setAccessibleText(choice.name() + ", " + getText());
     }
   }

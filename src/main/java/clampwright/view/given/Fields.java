@@ -7,6 +7,7 @@ import clampwright.joint.Fastener;
 import clampwright.joint.Material;
 import clampwright.joint.Sketch;
 import clampwright.joint.Tightening;
+import clampwright.view.Hover;
 import clampwright.view.field.Choice;
 import clampwright.view.field.ChoiceField;
 import clampwright.view.field.QuantityField;
@@ -15,6 +16,7 @@ import clampwright.view.field.SketchNumber;
 import java.util.List;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
+import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 
 /** Makes the fields of the given pane, with their ids. */
@@ -47,6 +49,15 @@ final class Fields {
     ChoiceField<T> field = choice(model, id, choice);
     field.getStyleClass().add("wide-field");
     return field;
+  }
+
+  /** A small button beside fields; what it does is said when the pointer rests on it. */
+  static Button smallButton(String sign, String does) {
+    Button button = new Button(sign);
+    button.getStyleClass().setAll("small-button");
+    button.setAccessibleText(does);
+    Hover.tell(button, () -> does);
+    return button;
   }
 
   /** A quiet line under fields that says what they come to. */

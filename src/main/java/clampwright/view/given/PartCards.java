@@ -108,9 +108,17 @@ public final class PartCards {
 
   private Section load() {
     Section section = new Section("Load per bolt");
-    section.add("Axial", Fields.quantity(model, "card-axial-load", LoadSection.axial(model)));
-    section.add("Enters at n", Fields.quantity(model, "card-n", LoadSection.introduction(model)));
+    section.add("Axial", LoadFields.quantity(model, "card-axial-load", LoadSection.axial(model)));
+    FieldRow n =
+        section.add(
+            "Enters at n", LoadFields.quantity(model, "card-n", LoadSection.introduction(model)));
+    model.shownCaseProperty().addListener(observable -> showFactor(n));
+    showWhile(n, sketch -> !IntroductionFields.isAtParts(model, sketch));
     return section;
+  }
+
+  private void showFactor(FieldRow row) {
+    Section.setShown(row, !IntroductionFields.isAtParts(model, model.sketch()));
   }
 
   private void showWhile(FieldRow row, Predicate<Sketch> wanted) {
