@@ -28,7 +28,13 @@ public final class GivenPane extends ScrollPane {
     part = new PartSection(model);
     VBox sheet =
         new VBox(
-            Headings.pane("Given"), fastener, new TighteningSection(model), load, method, part);
+            Headings.pane("Given"),
+            fastener,
+            new TighteningSection(model),
+            load,
+            method,
+            new CriteriaSection(model),
+            part);
     sheet.getStyleClass().add("sheet");
     setContent(sheet);
     setFitToWidth(true);
