@@ -66,6 +66,7 @@ public final class QuantityField extends StackPane implements Typed {
     model.sketchProperty().addListener((observable, old, sketch) -> follow(sketch));
     new ProblemNote(this, text);
     refresh();
+    showUnit();
   }
 
   /** Reads the sketch again, as when the number now stands for another part. */
@@ -248,7 +249,7 @@ public final class QuantityField extends StackPane implements Typed {
     if (!symbol.equals(unit.getText())) {
       unit.setText(symbol);
       getStyleClass().remove("with-unit");
-      if (symbol.length() > 1) {
+      if (!symbol.isEmpty()) {
         getStyleClass().add("with-unit");
       }
     }

@@ -1,6 +1,5 @@
 package clampwright.view.given;
 
-import clampwright.joint.Allowables;
 import clampwright.joint.Criteria;
 import clampwright.joint.Factors;
 import clampwright.joint.Sketch;
@@ -11,13 +10,11 @@ import clampwright.view.field.SketchNumber;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.function.BiFunction;
-import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
 import java.util.function.UnaryOperator;
 
-/** What the joint is judged by, but for the tolerances. */
+/** Stiffness, factors and fatigue rule that the joint is judged by. */
 final class CriteriaFields {
   private CriteriaFields() {}
 
@@ -60,20 +57,6 @@ final class CriteriaFields {
         sketch -> read.applyAsDouble(criteria(sketch).factors()),
         (sketch, value) ->
             withCriteria(sketch, it -> it.withFactors(write.apply(it.factors(), value))));
-  }
-
-  /** A limit of the bolt; empty = from its strength class, or by the fatigue rule. */
-  static SketchNumber limit(
-      String name,
-      Dimension dimension,
-      Function<Allowables, OptionalDouble> read,
-      BiFunction<Allowables, OptionalDouble, Allowables> write) {
-    return SketchNumber.optional(
-        name,
-        dimension,
-        sketch -> read.apply(criteria(sketch).allowables()),
-        (sketch, value) ->
-            withCriteria(sketch, it -> it.withAllowables(write.apply(it.allowables(), value))));
   }
 
   static SketchNumber cycles() {

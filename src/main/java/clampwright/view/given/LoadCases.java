@@ -21,7 +21,7 @@ final class LoadCases extends HBox {
 
   LoadCases(SketchModel model) {
     this.model = model;
-    getStyleClass().addAll("field-with-buttons", "wide-field");
+    getStyleClass().addAll("field-with-buttons", "case-field");
     shown = new ChoiceField<>(model, shown(model), this::show);
     shown.setId("load-case");
     HBox.setHgrow(shown, Priority.ALWAYS);

@@ -37,9 +37,15 @@ final class LoadFields {
     return field;
   }
 
-  static <T> ChoiceField<T> wideChoice(SketchModel model, String id, SketchChoice<T> choice) {
-    ChoiceField<T> field = Fields.wideChoice(model, id, choice);
+  static <T> ChoiceField<T> choice(SketchModel model, String id, SketchChoice<T> choice) {
+    ChoiceField<T> field = Fields.choice(model, id, choice);
     model.shownCaseProperty().addListener(observable -> field.refresh());
+    return field;
+  }
+
+  static <T> ChoiceField<T> wideChoice(SketchModel model, String id, SketchChoice<T> choice) {
+    ChoiceField<T> field = choice(model, id, choice);
+    field.getStyleClass().add("wide-field");
     return field;
   }
 

@@ -26,7 +26,7 @@ final class LoadSection extends Section {
   LoadSection(SketchModel model) {
     super("Load per bolt");
     this.model = model;
-    add("Load case", new LoadCases(model));
+    add("Case", new LoadCases(model));
     add("Name", LoadFields.name(model));
     add("Axial, most", LoadFields.quantity(model, "axial-load", axial(model)));
     add("Axial, least", LoadFields.quantity(model, "axial-least", LoadFields.axialLeast(model)));
@@ -42,7 +42,7 @@ final class LoadSection extends Section {
     temperature =
         add(
             "Temperature",
-            LoadFields.wideChoice(model, "load-temperature", LoadFields.temperature(model)));
+            LoadFields.choice(model, "load-temperature", LoadFields.temperature(model)));
     fold("temperatures", new TemperatureSection(model));
     OncePerPulse.keep(
         this,

@@ -4,20 +4,22 @@ import clampwright.joint.Scatter;
 
 /** Ways of tightening with the scatter that practice counts for them. */
 enum ScatterMethod {
-  DRY_TORQUE("torque, unlubricated", 0.35),
-  LUBRICATED_TORQUE("torque, lubricated", 0.25),
-  TENSIONER("hydraulic tensioner", 0.15),
-  WASHER("load-indicating washer", 0.1),
-  ELONGATION("bolt elongation", 0.05),
-  TYPED("typed", Double.NaN);
+  DRY_TORQUE("torque, unlubricated", "", 0.35),
+  LUBRICATED_TORQUE("torque, lubricated", "", 0.25),
+  TENSIONER("hydraulic tensioner", "", 0.15),
+  WASHER("indicating washer", "load-", 0.1),
+  ELONGATION("bolt elongation", "", 0.05),
+  TYPED("typed", "", Double.NaN);
 
   private static final double SAME = 1e-9;
 
   private final String label;
+  private final String before;
   private final double share;
 
-  ScatterMethod(String label, double share) {
+  ScatterMethod(String label, String before, double share) {
     this.label = label;
+    this.before = before;
     this.share = share;
   }
 
@@ -25,9 +27,9 @@ enum ScatterMethod {
     return label;
   }
 
-  /** As listed, with the scatter. */
+  /** As listed, in full and with the scatter. */
   String listed() {
-    return this == TYPED ? label : label + ", ±" + Math.round(share * 100) + " %";
+    return this == TYPED ? label : before + label + ", ±" + Math.round(share * 100) + " %";
   }
 
   String origin() {

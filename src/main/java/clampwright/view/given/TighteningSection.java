@@ -47,7 +47,7 @@ final class TighteningSection extends Section {
     add("or α_A", Fields.quantity(model, "tightening-factor", ScatterFields.factor()));
     torsionFriction =
         add(
-            "µ in thread, for torsion",
+            "µ for torsion",
             Fields.optional(
                 model, "torsion-friction", TargetFields.torsionFriction(), "not given"));
     Hover.tell(torsionFriction, () -> TORSION);
