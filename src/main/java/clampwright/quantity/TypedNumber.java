@@ -111,6 +111,7 @@ final class TypedNumber {
       case TORQUE -> metric ? "48 or 35 lbf·ft" : "35 or 48 N·m";
       case TEMPERATURE -> metric ? "80 or 176 °F" : "176 or 80 °C";
       case SHARE -> "25";
+      case COUNT -> "2";
       default -> "2.5";
     };
   }

@@ -5,6 +5,7 @@ import clampwright.joint.Sketch;
 import clampwright.view.Hover;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import javafx.scene.AccessibleRole;
 import javafx.scene.control.Button;
 import javafx.scene.input.KeyEvent;
@@ -18,11 +19,22 @@ import javafx.scene.layout.Region;
 public final class ChoiceField<T> extends Button {
   private final SketchModel model;
   private final SketchChoice<T> choice;
+  private final Consumer<T> taken;
   private Optional<T> held = Optional.empty();
 
   public ChoiceField(SketchModel model, SketchChoice<T> choice) {
+    this(model, choice, value -> change(model, choice, value));
+  }
+
+  /**
+   * A field whose choice need not change the sketch, such as what is shown of it.
+   *
+   * @param taken told what has been chosen, also when it is chosen already
+   */
+  public ChoiceField(SketchModel model, SketchChoice<T> choice, Consumer<T> taken) {
     this.model = model;
     this.choice = choice;
+    this.taken = taken;
     getStyleClass().setAll("choice-field");
     setAccessibleRole(AccessibleRole.COMBO_BOX);
     setMnemonicParsing(false);
@@ -45,20 +57,21 @@ public final class ChoiceField<T> extends Button {
   /** Opens the list under the field. */
   public void open() {
     List<Choice<T>> choices = choice.choices().apply(model.sketch());
-    new ChoiceList<>(this, choices, held, this::choose).show();
+    new ChoiceList<>(this, choices, held, taken).show();
   }
 
-  private void choose(T value) {
-    if (!held.equals(Optional.of(value))) {
+  private static <T> void change(SketchModel model, SketchChoice<T> choice, T value) {
+    if (!choice.read().apply(model.sketch()).equals(Optional.of(value))) {
       model.change(choice.name(), sketch -> choice.write().apply(sketch, value));
     }
   }
 
   private void follow(Sketch sketch) {
     Optional<T> value = choice.read().apply(sketch);
-    if (!value.equals(held) || getText().isEmpty()) {
-      held = value;
-      setText(value.map(choice.label()).orElse(""));
+    String label = value.map(choice.label()).orElse("");
+    held = value;
+    if (!label.equals(getText())) {
+      setText(label);
       setAccessibleText(choice.name() + ", " + getText());
     }
   }

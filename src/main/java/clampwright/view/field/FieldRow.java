@@ -1,5 +1,6 @@
 package clampwright.view.field;
 
+import clampwright.view.MathText;
 import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.layout.HBox;
@@ -11,12 +12,25 @@ public final class FieldRow extends HBox {
   public FieldRow(String name, Region field) {
     getStyleClass().add("field-row");
     setAlignment(Pos.CENTER_LEFT);
-    Label label = new Label(name);
+    Label label = label(name);
     label.getStyleClass().add("field-label");
     label.setMinWidth(0);
     label.setMaxWidth(Double.MAX_VALUE);
     HBox.setHgrow(label, Priority.ALWAYS);
     label.setLabelFor(field instanceof QuantityField quantity ? quantity.text() : field);
     getChildren().addAll(label, field);
+  }
+
+  /** A symbol's index is set low: R_m. */
+  private static Label label(String name) {
+    if (!name.contains("_")) {
+      return new Label(name);
+    }
+    MathText math = new MathText();
+    math.show(name);
+    Label label = new Label();
+    label.setGraphic(math);
+    label.setAccessibleText(name);
+    return label;
   }
 }

@@ -58,10 +58,13 @@ final class FieldText {
 
   /**
    * A record's refusal as a sentence at the field: the value it names stands in the field already,
-   * and there in the reader's units.
+   * and there in the reader's units. Limits of a share are said in per cent, as it is read.
    */
-  static String refusal(IllegalArgumentException refused) {
+  static String refusal(Dimension dimension, IllegalArgumentException refused) {
     String sentence = refused.getMessage().replaceFirst(" \\S*\\d\\S*( \\S+)? must ", " must ");
+    if (dimension == Dimension.SHARE) {
+      sentence = sentence.replaceFirst("\\b1$", "100 %");
+    }
     return Character.toUpperCase(sentence.charAt(0)) + sentence.substring(1) + ".";
   }
 }

@@ -44,6 +44,7 @@ public final class QuantityField extends StackPane implements Typed {
   private OptionalDouble before = OptionalDouble.empty();
   private UnitSystem units = UnitSystem.METRIC;
   private OptionalDouble automatic = OptionalDouble.empty();
+  private String open = "auto";
   private boolean typing;
   private boolean showing;
 
@@ -65,6 +66,7 @@ public final class QuantityField extends StackPane implements Typed {
     model.sketchProperty().addListener((observable, old, sketch) -> follow(sketch));
     new ProblemNote(this, text);
     refresh();
+    showUnit();
   }
 
   /** Reads the sketch again, as when the number now stands for another part. */
@@ -85,6 +87,12 @@ public final class QuantityField extends StackPane implements Typed {
   /** Shows what an empty field comes to [units inside the program]. */
   public void setAutomatic(OptionalDouble automatic) {
     this.automatic = automatic;
+    showPrompt();
+  }
+
+  /** Says what an empty field means where the program has no number for it. */
+  public void setOpen(String open) {
+    this.open = open;
     showPrompt();
   }
 
@@ -140,7 +148,7 @@ public final class QuantityField extends StackPane implements Typed {
     try {
       number.write().apply(model.sketch(), value);
     } catch (IllegalArgumentException refused) {
-      say(FieldText.refusal(refused));
+      say(FieldText.refusal(number.dimension(), refused));
       return false;
     }
     say("");
@@ -241,7 +249,7 @@ public final class QuantityField extends StackPane implements Typed {
     if (!symbol.equals(unit.getText())) {
       unit.setText(symbol);
       getStyleClass().remove("with-unit");
-      if (symbol.length() > 1) {
+      if (!symbol.isEmpty()) {
         getStyleClass().add("with-unit");
       }
     }
@@ -253,7 +261,7 @@ public final class QuantityField extends StackPane implements Typed {
         !number.optional()
             ? ""
             : automatic.isEmpty()
-                ? "auto"
+                ? open
                 : "auto " + FieldText.of(number.dimension(), units, automatic.getAsDouble()));
   }
 }

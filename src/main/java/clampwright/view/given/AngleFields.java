@@ -116,7 +116,7 @@ final class AngleFields {
   }
 
   /** Degrees without the dust of the way through radians. */
-  private static double degrees(double radians) {
+  static double degrees(double radians) {
     return Math.round(Math.toDegrees(radians) * 1e9) / 1e9;
   }
 }

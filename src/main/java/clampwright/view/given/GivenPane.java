@@ -28,7 +28,15 @@ public final class GivenPane extends ScrollPane {
     load = new LoadSection(model);
     method = new MethodSection(model);
     part = new PartSection(model);
-    VBox sheet = new VBox(Headings.pane("Given"), fastener, tightening, load, method, part);
+    VBox sheet =
+        new VBox(
+            Headings.pane("Given"),
+            fastener,
+            tightening,
+            load,
+            method,
+            new CriteriaSection(model),
+            part);
     sheet.getStyleClass().add("sheet");
     setContent(sheet);
     setFitToWidth(true);

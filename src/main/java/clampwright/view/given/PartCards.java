@@ -5,6 +5,7 @@ import clampwright.edit.SketchModel;
 import clampwright.edit.Stacking;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
+import clampwright.joint.Target;
 import clampwright.view.field.FieldRow;
 import java.util.EnumMap;
 import java.util.Map;
@@ -109,15 +110,33 @@ public final class PartCards {
 
   private Section preload() {
     Section section = new Section("Tightening");
-    section.add("Preload", Fields.quantity(model, "card-preload", TighteningSection.preload()));
+    FieldRow preload =
+        section.add("Preload", Fields.quantity(model, "card-preload", TargetFields.preload()));
+    FieldRow share =
+        section.add(
+            "Share of proof",
+            Fields.quantity(model, "card-proof-share", TargetFields.proofShare()));
+    FieldRow torque =
+        section.add("Torque", Fields.quantity(model, "card-torque", TargetFields.torque()));
+    showWhile(preload, sketch -> TargetFields.is(sketch, Target.Force.class));
+    showWhile(share, sketch -> TargetFields.is(sketch, Target.ProofFraction.class));
+    showWhile(torque, sketch -> TargetFields.torque().read().apply(sketch).isPresent());
     return section;
   }
 
   private Section load() {
     Section section = new Section("Load per bolt");
-    section.add("Axial", Fields.quantity(model, "card-axial-load", LoadSection.axial(model)));
-    section.add("Enters at n", Fields.quantity(model, "card-n", LoadSection.introduction(model)));
+    section.add("Axial", LoadFields.quantity(model, "card-axial-load", LoadSection.axial(model)));
+    FieldRow n =
+        section.add(
+            "Enters at n", LoadFields.quantity(model, "card-n", LoadSection.introduction(model)));
+    model.shownCaseProperty().addListener(observable -> showFactor(n));
+    showWhile(n, sketch -> !IntroductionFields.isAtParts(model, sketch));
     return section;
+  }
+
+  private void showFactor(FieldRow row) {
+    Section.setShown(row, !IntroductionFields.isAtParts(model, model.sketch()));
   }
 
   private void showWhile(FieldRow row, Predicate<Sketch> wanted) {

@@ -74,6 +74,38 @@ public final class PartFields {
         (element, value) -> element.withMaterial(OwnMaterial.of(element.material(), value)));
   }
 
+  /** R_m of the material. */
+  QuantityField tensile() {
+    return strength("Tensile strength", Material::tensile, Material::withTensile);
+  }
+
+  /** The pressure under a clamp face that the material bears. */
+  QuantityField pressureLimit() {
+    return strength("Pressure limit", Material::pressureLimit, Material::withPressureLimit);
+  }
+
+  private QuantityField strength(
+      String name,
+      Function<Material, OptionalDouble> read,
+      BiFunction<Material, OptionalDouble, Material> write) {
+    QuantityField field =
+        new QuantityField(
+            model,
+            SketchNumber.optional(
+                name,
+                Dimension.STRESS,
+                sketch ->
+                    element(sketch)
+                        .map(element -> read.apply(element.material()))
+                        .orElse(OptionalDouble.empty()),
+                (sketch, value) ->
+                    with(
+                        sketch,
+                        element -> element.withMaterial(write.apply(element.material(), value)))));
+    field.setOpen("not given");
+    return field;
+  }
+
   public QuantityField hole() {
     return length("Hole diameter", Element::hole, Element::withHole);
   }

@@ -50,13 +50,24 @@ final class PartSection extends Section {
             fields.diameter(),
             fields.leftEdge(),
             fields.rightEdge(),
-            fields.modulus());
+            fields.modulus(),
+            fields.tensile(),
+            fields.pressureLimit());
     name.setId(prefix + "-name");
     name.getStyleClass().add("wide-field");
     material.getStyleClass().add("wide-field");
     material.setId(prefix + "-material");
     outline.setId(prefix + "-outline");
-    List<String> ids = List.of("-thickness", "-hole", "-diameter", "-left", "-right", "-modulus");
+    List<String> ids =
+        List.of(
+            "-thickness",
+            "-hole",
+            "-diameter",
+            "-left",
+            "-right",
+            "-modulus",
+            "-tensile",
+            "-pressure-limit");
     for (int i = 0; i < ids.size(); i++) {
       numbers.get(i).text().setId(prefix + ids.get(i));
     }
@@ -69,6 +80,9 @@ final class PartSection extends Section {
     diameter = add("Outside Ø", numbers.get(2));
     left = add("Edge, left", numbers.get(3));
     right = add("Edge, right", numbers.get(4));
+    FieldRow tensile = add("R_m", numbers.get(6));
+    FieldRow pressure = add("Pressure limit", numbers.get(7));
+    fold("strength", tensile, pressure).setId(prefix + "-fold-strength");
     for (QuantityField size : numbers.subList(0, 3)) {
       Hover.tell(size, this::origin);
     }

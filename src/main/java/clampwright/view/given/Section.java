@@ -9,7 +9,7 @@ import javafx.scene.layout.VBox;
 
 /** A heading with its rows of fields; rarely used rows fold away. */
 class Section extends VBox {
-  private final VBox rows = new VBox();
+  private final Rows rows = new Rows();
   private final Label heading;
 
   Section(String title) {
@@ -17,7 +17,6 @@ class Section extends VBox {
     heading = new Label(title);
     heading.getStyleClass().add("section-heading");
     heading.setMaxWidth(Double.MAX_VALUE);
-    rows.getStyleClass().add("rows");
     getChildren().addAll(heading, rows);
   }
 
@@ -26,17 +25,15 @@ class Section extends VBox {
   }
 
   final FieldRow add(String name, Region field) {
-    FieldRow row = new FieldRow(name, field);
-    rows.getChildren().add(row);
-    return row;
+    return rows.add(name, field);
   }
 
   final void add(Node node) {
-    rows.getChildren().add(node);
+    rows.add(node);
   }
 
-  /** Puts these rows behind a small button that shows and hides them. */
-  final void fold(String what, Node... folded) {
+  /** Puts these rows behind a small button that shows and hides them, and returns it. */
+  final Button fold(String what, Node... folded) {
     Button toggle = new Button();
     toggle.getStyleClass().setAll("fold");
     Region chevron = new Region();
@@ -62,6 +59,7 @@ class Section extends VBox {
     rows.getChildren().add(toggle);
     rows.getChildren().addAll(folded);
     show.run();
+    return toggle;
   }
 
   /** Shows a row, or takes it out without leaving a gap. */
