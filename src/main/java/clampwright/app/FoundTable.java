@@ -162,12 +162,18 @@ final class FoundTable {
             text(dimension, judged.demand()),
             text(dimension, judged.capacity()),
             Verdicts.margin(judged.margin()),
-            (judged.passes() ? "" : "fails; ") + Sentences.where(judged.where(), joint));
+            said(judged));
       } else if (verdict instanceof Verdict.NotApplicable not) {
         table.row(name, "–", "–", "–", "not applicable: " + not.why().text());
       }
     }
     return table.text() + factors();
+  }
+
+  private String said(Verdict.Judged judged) {
+    String where = Sentences.where(judged.where(), joint());
+    String fails = judged.passes() ? "" : "fails";
+    return fails.isEmpty() || where.isEmpty() ? fails + where : fails + "; " + where;
   }
 
   private String factors() {

@@ -1,10 +1,13 @@
 package clampwright.figure.working;
 
+import clampwright.mechanics.checks.CheckKind;
 import java.util.ArrayList;
 import java.util.List;
 
 /** Checks of the bolt load and of parting. */
 record BoltLoadSteps(CheckWorking check) {
+
+  private static final double SCREEN = 0.75;
 
   /** The outside load that brings the bolt to a limit. */
   List<Step> limit(String symbol, double limit) {
@@ -42,7 +45,23 @@ record BoltLoadSteps(CheckWorking check) {
               check.result(check.judged().capacity())));
     }
     steps.add(check.demand("F_A", check.pull()));
+    if (check.judged().kind() == CheckKind.RUPTURE) {
+      steps.add(screen(limit));
+    }
     return steps;
+  }
+
+  /** Whether the preload leaves room to part before it breaks, F_max ≤ 0.75·P_u. */
+  private Step screen(double limit) {
+    boolean kept = check.max() <= SCREEN * limit;
+    return Step.remark(
+        "Beside it",
+        "F_max is "
+            + (kept ? "" : "not ")
+            + "within 0.75·P_u = "
+            + check.numbers().forceResult(SCREEN * limit)
+            + ", the screen for parting before rupture",
+        "NASA-STD-5020, corrected from 0.85 in its first print");
   }
 
   /** The least preload against the load, and beside it the form that counts the bolt's share. */
