@@ -35,12 +35,14 @@ import org.testfx.util.WaitForAsyncUtils;
 @ExtendWith(ApplicationExtension.class)
 class GivenPaneTest {
   private SketchModel model;
+  private GivenPane pane;
   private FxRobot robot;
 
   @Start
   void start(Stage stage) {
     model = new SketchModel(Sketches.cover());
-    stage.setScene(new Scene(new GivenPane(model), 300, 1100));
+    pane = new GivenPane(model);
+    stage.setScene(new Scene(pane, 300, 1100));
     stage.show();
   }
 
@@ -65,9 +67,18 @@ class GivenPaneTest {
   }
 
   private void choose(String field, String label) {
+    robot.interact(() -> scrollTo(robot.lookup(field).query()));
     robot.clickOn(field);
     robot.clickOn(cell(label));
     WaitForAsyncUtils.waitForFxEvents();
+  }
+
+  private void scrollTo(Node node) {
+    Node content = pane.getContent();
+    double y = content.sceneToLocal(node.localToScene(0, 0)).getY();
+    double room = content.getBoundsInLocal().getHeight() - pane.getViewportBounds().getHeight();
+    pane.setVvalue(room <= 0 ? 0 : Math.max(0, Math.min(1, (y - 200) / room)));
+    pane.layout();
   }
 
   private Node cell(String label) {
