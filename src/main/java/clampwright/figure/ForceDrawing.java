@@ -110,12 +110,16 @@ final class ForceDrawing {
           new Mark.Arrow(
               Tag.of(Role.PRELOAD, Part.PRELOAD), new Point(x, bottom), end, false, true));
     }
+    String text =
+        "preload " + Quantities.text(Dimension.FORCE, sketch.units(), force.getAsDouble());
+    double callOuts = CallOuts.LEFT + CallOuts.WIDTH + 4;
+    boolean room = x - TextWidth.of(text, 2.9, Mark.Weight.BOLD) - 2 > callOuts;
     drawing.text(
         Tag.of(Role.PRELOAD, Part.PRELOAD),
-        x - 2,
+        room ? x - 2 : x + 2,
         top - 3.6,
-        "preload " + Quantities.text(Dimension.FORCE, sketch.units(), force.getAsDouble()),
-        Mark.Anchor.END,
+        text,
+        room ? Mark.Anchor.END : Mark.Anchor.START,
         2.9,
         Mark.Weight.BOLD);
   }

@@ -178,12 +178,13 @@ public final class JointDiagramFigure {
     Point upper = at(x, boltForce);
     Point lower = at(x, boltForce - axial);
     drawing.add(new Mark.Arrow(tag, lower, upper, true, true));
+    boolean onAxis = lower.y() + 5 > at(0, 0).y();
     drawing.text(
         tag,
-        upper.x() - 2,
-        lower.y() + 4,
+        upper.x() + (onAxis ? 2 : -2),
+        onAxis ? (upper.y() + lower.y()) / 2 + 1 : lower.y() + 4,
         "load " + Quantities.text(Dimension.FORCE, sketch.units(), axial),
-        Mark.Anchor.END,
+        onAxis ? Mark.Anchor.START : Mark.Anchor.END,
         SIZE,
         Mark.Weight.BOLD);
   }
