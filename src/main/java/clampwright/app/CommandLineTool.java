@@ -17,7 +17,8 @@ import picocli.CommandLine.IVersionProvider;
     synopsisHeading = "Usage:%n",
     customSynopsis = {
       "  clampwright [FILE]               open the editor",
-      "  clampwright found FILE [--json]  print the readouts without a display"
+      "  clampwright found FILE [--json]  print the readouts without a display",
+      "  clampwright figure FILE… -o OUT  write pictures without a display"
     },
     optionListHeading = "%nOptions:%n",
     commandListHeading = "%nCommands:%n",
@@ -48,7 +49,7 @@ final class CommandLineTool {
     try {
       Path path = Path.of(argument);
       boolean word = argument.matches("[\\p{Alpha}-]*");
-      return !word || Files.exists(path) && !argument.equals("found");
+      return !word || Files.exists(path) && !argument.equals("found") && !argument.equals("figure");
     } catch (InvalidPathException e) {
       return false;
     }
@@ -58,6 +59,7 @@ final class CommandLineTool {
   static int run(PrintStream out, PrintStream err, String... arguments) {
     return new CommandLine(new CommandLineTool())
         .addSubcommand(new FoundCommand(out, err))
+        .addSubcommand(new FigureCommand(out, err))
         .setExpandAtFiles(false)
         .setOut(new PrintWriter(out, true))
         .setErr(new PrintWriter(err, true))

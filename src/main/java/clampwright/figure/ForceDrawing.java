@@ -116,10 +116,10 @@ final class ForceDrawing {
     boolean room = x - TextWidth.of(text, 2.9, Mark.Weight.BOLD) - 2 > callOuts;
     drawing.text(
         Tag.of(Role.PRELOAD, Part.PRELOAD),
-        room ? x - 2 : x + 2,
-        top - 3.6,
+        room ? x - 2 : x,
+        room ? top - 3.6 : top - 8,
         text,
-        room ? Mark.Anchor.END : Mark.Anchor.START,
+        room ? Mark.Anchor.END : Mark.Anchor.MIDDLE,
         2.9,
         Mark.Weight.BOLD);
   }

@@ -9,6 +9,9 @@ import java.util.Map;
  * always doubled by line style or letter.
  */
 public final class Palette {
+  private static final int WHITE_PAPER = 0xFFFFFFFF;
+  private static final int BLACK = 0xFF000000;
+
   public static final Palette LIGHT =
       new Palette(
           0xFFFBFAF6,
@@ -39,6 +42,12 @@ public final class Palette {
           0xFF8ED3F0,
           0xFFFF8A80,
           0xFFE0B050);
+
+  /** For white paper. */
+  public static final Palette WHITE = LIGHT.onWhite();
+
+  /** Black on white: hatching, line styles and letters carry everything. */
+  public static final Palette BLACK_AND_WHITE = LIGHT.inBlack();
 
   private final Map<Role, Look> looks = new EnumMap<>(Role.class);
   private final int paper;
@@ -107,6 +116,60 @@ public final class Palette {
     put(Role.INSERT_GRIP, new Look(faded(quiet, 0xB0), 0.25, paper));
     put(Role.PROBLEM, new Look(alarm, 0.3, alarm));
     put(Role.PROBLEM_PLATE, new Look(alarm, 0.3, paper));
+  }
+
+  private Palette(int paper, Map<Role, Look> looks) {
+    this.paper = paper;
+    this.looks.putAll(looks);
+  }
+
+  /** The same colours, but white where the paper shows. */
+  private Palette onWhite() {
+    Map<Role, Look> changed = new EnumMap<>(Role.class);
+    looks.forEach(
+        (role, look) ->
+            changed.put(
+                role,
+                look.fill() == paper
+                    ? new Look(look.stroke(), look.width(), WHITE_PAPER, look.dash())
+                    : look));
+    return new Palette(WHITE_PAPER, changed);
+  }
+
+  /**
+   * Every line black, bodies and governed zones unfilled, small filled marks black. The fainter
+   * lines of the right half stay thin.
+   */
+  private Palette inBlack() {
+    Map<Role, Look> changed = new EnumMap<>(Role.class);
+    looks.forEach((role, look) -> changed.put(role, black(role, look)));
+    return new Palette(WHITE_PAPER, changed);
+  }
+
+  private Look black(Role role, Look look) {
+    int stroke = look.stroke() >>> 24 == 0 ? 0 : BLACK;
+    int fill =
+        switch (role) {
+          case LAYER_BODY, WASHER_BODY, BOLT_BODY -> WHITE_PAPER;
+          case HEAD_GOVERNS, NUT_GOVERNS, BOTH_GOVERN -> 0;
+          case PRELOAD_BAND, BIN_HOLDS -> 0xFFD0D0D0;
+          default -> look.fill() >>> 24 == 0 ? 0 : look.fill() == paper ? WHITE_PAPER : BLACK;
+        };
+    return new Look(stroke, look.width(), fill, look.dash());
+  }
+
+  /** The same, with lines and dashes so many times as wide and long. */
+  public Palette scaled(double times) {
+    Map<Role, Look> changed = new EnumMap<>(Role.class);
+    looks.forEach(
+        (role, look) -> {
+          double[] dash = look.dash().clone();
+          for (int i = 0; i < dash.length; i++) {
+            dash[i] *= times;
+          }
+          changed.put(role, new Look(look.stroke(), times * look.width(), look.fill(), dash));
+        });
+    return new Palette(paper, changed);
   }
 
   private void put(Role role, Look look) {

@@ -1,0 +1,91 @@
+package clampwright.app;
+
+import clampwright.figure.Figure;
+import clampwright.figure.PictureFigure;
+import clampwright.figure.Sentences;
+import clampwright.joint.Sketch;
+import clampwright.mechanics.Assessment;
+import clampwright.paint.Palette;
+import clampwright.paint.print.PdfPicture;
+import clampwright.paint.print.PngPicture;
+import clampwright.paint.print.SvgPicture;
+import java.nio.charset.StandardCharsets;
+
+/**
+ * A picture that leaves the program.
+ *
+ * @param kind of file
+ * @param theme colours
+ * @param dpi resolution of a PNG [dots per inch]
+ * @param request size and content
+ */
+record Picture(Kind kind, Theme theme, double dpi, PictureFigure.Request request) {
+
+  /** Kinds of files. */
+  enum Kind {
+    PNG,
+    SVG,
+    PDF;
+
+    String ending() {
+      return name().toLowerCase(java.util.Locale.ROOT);
+    }
+  }
+
+  /** Colours of a picture. */
+  enum Theme {
+    LIGHT("light", "light, on white"),
+    DARK("dark", "dark"),
+    BLACK_AND_WHITE("bw", "black and white");
+
+    private final String word;
+    private final String title;
+
+    Theme(String word, String title) {
+      this.word = word;
+      this.title = title;
+    }
+
+    String word() {
+      return word;
+    }
+
+    String title() {
+      return title;
+    }
+
+    Palette palette() {
+      return switch (this) {
+        case LIGHT -> Palette.WHITE;
+        case DARK -> Palette.DARK;
+        case BLACK_AND_WHITE -> Palette.BLACK_AND_WHITE;
+      };
+    }
+  }
+
+  Figure figure(Sketch sketch) {
+    return PictureFigure.of(sketch, Assessment.of(sketch.joint()), request);
+  }
+
+  /** Colours, and lines as wide as the preset's type is large. */
+  Palette palette() {
+    return theme.palette().scaled(request.preset().scale());
+  }
+
+  /** The file. */
+  byte[] bytes(Sketch sketch) {
+    Figure figure = figure(sketch);
+    Palette palette = palette();
+    return switch (kind) {
+      case PNG -> PngPicture.of(figure, palette, dpi);
+      case SVG ->
+          SvgPicture.of(
+                  figure,
+                  palette,
+                  "Bolted joint in section. " + Sentences.CAUTION,
+                  part -> Places.of(part, sketch.joint()))
+              .getBytes(StandardCharsets.UTF_8);
+      case PDF -> PdfPicture.of(figure, palette);
+    };
+  }
+}
