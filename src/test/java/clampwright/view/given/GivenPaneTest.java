@@ -18,6 +18,7 @@ import clampwright.view.Sketches;
 import java.util.Optional;
 import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.control.ButtonBase;
 import javafx.scene.control.Labeled;
 import javafx.scene.control.ListCell;
 import javafx.scene.control.TextField;
@@ -64,8 +65,9 @@ class GivenPaneTest {
     WaitForAsyncUtils.waitForFxEvents();
   }
 
+  /** Opens the list of a field that may lie outside what the pane shows, and clicks a value. */
   private void choose(String field, String label) {
-    robot.clickOn(field);
+    robot.interact(() -> ((ButtonBase) robot.lookup(field).query()).fire());
     robot.clickOn(cell(label));
     WaitForAsyncUtils.waitForFxEvents();
   }
