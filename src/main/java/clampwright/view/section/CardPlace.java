@@ -122,16 +122,20 @@ final class CardPlace {
     boolean left = at.x() + GAP + frame.getWidth() > room.getWidth();
     double x = left ? at.x() - GAP - frame.getWidth() : at.x() + GAP;
     double y = at.y() - 20;
-    frame.relocate(
-        Math.rint(Math.max(4, x)),
-        Math.rint(Math.max(4, Math.min(room.getHeight() - frame.getHeight() - 4, y))));
+    frame.relocate(Math.rint(Math.max(4, x)), Math.rint(Math.max(4, Math.min(lowest(), y))));
   }
 
-  /** Keeps the frame as large as its fields need. */
+  /** Keeps the frame as large as its fields need, and on the pane when more of them show. */
   void layout() {
     if (isOpen()) {
       frame.autosize();
+      frame.setLayoutY(Math.min(frame.getLayoutY(), lowest()));
     }
+  }
+
+  /** The lowest place at which the whole frame is on the pane. */
+  private double lowest() {
+    return Math.rint(Math.max(4, pane.getLayoutBounds().getHeight() - frame.getHeight() - 4));
   }
 
   private static Optional<Node> firstField(Node node) {
