@@ -54,9 +54,22 @@ final class FrameBench {
         new Thread(() -> Application.launch(clampwright.app.ClampwrightApp.class, file.toString()));
     editor.setDaemon(true);
     editor.start();
+    while (!isUp()) {
+      Thread.onSpinWait();
+    }
     Region section = section();
     System.out.println(new Times(drag(section, sketch)).line("event to painted canvas"));
     Runtime.getRuntime().halt(0);
+  }
+
+  /** Whether the toolkit takes orders yet. */
+  private static boolean isUp() {
+    try {
+      Platform.runLater(() -> {});
+      return true;
+    } catch (IllegalStateException notYet) {
+      return false;
+    }
   }
 
   /** The section of the editor, once it shows the sketch at its size. */
