@@ -69,19 +69,16 @@ public final class PictureFigure {
     double bottom = words(left, right, height - MARGIN - inset);
     Optional<Solved> solved =
         assessment instanceof Solved found ? Optional.of(found) : Optional.empty();
+    if (solved.isPresent() && hasSide()) {
+      right -= SIDE;
+      double below = top + (request.preset().isFramed() ? TitleBlock.TALL : 0);
+      side(solved.get(), right + 4, below, bottom);
+    }
     if (solved.isPresent() && request.shown().contains(Show.DIAGRAM)) {
       bottom -= DIAGRAM;
       place(
           JointDiagramFigure.of(sketch, solved.get(), request.loadCase(), right - left, DIAGRAM),
           left,
-          bottom);
-    }
-    if (solved.isPresent() && hasSide()) {
-      right -= SIDE;
-      side(
-          solved.get(),
-          right + 4,
-          top + (request.preset().isFramed() ? TitleBlock.TALL : 0),
           bottom);
     }
     section(left, top, right - left, bottom - top);
@@ -111,16 +108,24 @@ public final class PictureFigure {
     place(new Figure(figure.title(), wide, tall, shown), x, y);
   }
 
-  private void side(Solved solved, double x, double y, double bottom) {
-    double below = y;
+  /** Readouts and ladder, one below the other, made smaller where there is not room enough. */
+  private void side(Solved solved, double x, double top, double bottom) {
+    double wide = SIDE - 6;
+    List<Mark> side = new ArrayList<>();
+    double tall = 0;
     if (request.shown().contains(Show.READOUTS)) {
-      Figure readouts = ReadoutsFigure.of(sketch, solved, request.loadCase(), SIDE - 6);
-      place(readouts, x, below);
-      below += readouts.height() + 4;
+      Figure readouts = ReadoutsFigure.of(sketch, solved, request.loadCase(), wide);
+      side.addAll(readouts.marks());
+      tall = readouts.height() + 4;
     }
     if (request.shown().contains(Show.LADDER)) {
-      place(LoadLadderFigure.of(sketch, solved, request.loadCase(), SIDE - 6, LADDER), x, below);
+      double room = Math.max(SHORTEST_LADDER, Math.min(LADDER, bottom - top - tall));
+      Figure ladder = LoadLadderFigure.of(sketch, solved, request.loadCase(), wide, room);
+      side.addAll(new Moved(0, tall, 1).of(ladder));
+      tall += room;
     }
+    double scale = Math.min(1, (bottom - top) / tall);
+    marks.addAll(new Moved(x, top, scale).of(new Figure("Side", wide, tall, side)));
   }
 
   /** Caption and caution at the bottom; gives where what is above them must end. */

@@ -22,7 +22,7 @@ import javax.imageio.stream.ImageOutputStream;
 /** A figure as a PNG picture, with its resolution recorded. */
 public final class PngPicture {
   private static final double MM_PER_INCH = 25.4;
-  private static final String STANDARD = "javax_imageio_1.0";
+  private static final String NATIVE = "javax_imageio_png_1.0";
 
   /** Beyond this a picture would not fit in memory. */
   private static final long MOST_PIXELS = 200_000_000;
@@ -87,16 +87,14 @@ public final class PngPicture {
     }
   }
 
-  /** Pixel size of the standard metadata is in millimetres per pixel. */
   private static void record(IIOMetadata metadata, double dpi) throws IIOInvalidTreeException {
-    IIOMetadataNode root = new IIOMetadataNode(STANDARD);
-    IIOMetadataNode dimension = new IIOMetadataNode("Dimension");
-    for (String side : new String[] {"HorizontalPixelSize", "VerticalPixelSize"}) {
-      IIOMetadataNode size = new IIOMetadataNode(side);
-      size.setAttribute("value", Double.toString(MM_PER_INCH / dpi));
-      dimension.appendChild(size);
-    }
-    root.appendChild(dimension);
-    metadata.mergeTree(STANDARD, root);
+    String perMetre = Long.toString(Math.round(dpi * 1000 / MM_PER_INCH));
+    IIOMetadataNode size = new IIOMetadataNode("pHYs");
+    size.setAttribute("pixelsPerUnitXAxis", perMetre);
+    size.setAttribute("pixelsPerUnitYAxis", perMetre);
+    size.setAttribute("unitSpecifier", "meter");
+    IIOMetadataNode root = new IIOMetadataNode(NATIVE);
+    root.appendChild(size);
+    metadata.mergeTree(NATIVE, root);
   }
 }
