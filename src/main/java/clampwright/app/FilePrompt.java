@@ -15,4 +15,12 @@ interface FilePrompt {
    * @param suggested name of the file
    */
   Optional<Path> toSave(String suggested);
+
+  /**
+   * A file to write something to that is no sketch; empty when the user would rather not.
+   *
+   * @param title of the question
+   * @param suggested name of the file, whose ending says what it is
+   */
+  Optional<Path> toExport(String title, String suggested);
 }

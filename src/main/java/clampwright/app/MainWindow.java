@@ -4,7 +4,10 @@ import clampwright.edit.SketchModel;
 import clampwright.view.field.Typed;
 import clampwright.view.section.SectionPane;
 import java.io.File;
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
 import javafx.application.Platform;
@@ -28,6 +31,8 @@ final class MainWindow implements Documents.Desk {
   /** Share of a small screen that the window takes when it is not maximized. */
   private static final double ROOM = 0.92;
 
+  private final FilePrompt prompt;
+  private final Questions questions;
   private final Stage stage;
   private final SketchModel model;
   private final Settings settings;
@@ -47,6 +52,8 @@ final class MainWindow implements Documents.Desk {
     this.stage = stage;
     this.model = model;
     this.settings = settings;
+    this.prompt = prompt;
+    this.questions = questions;
     Settings.Values values = settings.values();
     documents = new Documents(model, prompt, questions, settings, this);
     layout = new WindowLayout(model, settings, () -> new WindowParts(this, model, settings), hint);
@@ -72,6 +79,36 @@ final class MainWindow implements Documents.Desk {
         .titleProperty()
         .bind(model.sketchProperty().map(sketch -> sketch.name() + " — Clampwright"));
     stage.setOnCloseRequest(this::closing);
+  }
+
+  /** Asks what a picture of the sketch is to show, and writes it. */
+  void exportFigure() {
+    commit();
+    PictureWindow.show(stage, model, prompt, questions);
+  }
+
+  /** Writes the schedule as comma-separated values. */
+  void exportSchedule() {
+    commit();
+    prompt
+        .toExport("Export schedule", model.sketch().name() + ".csv")
+        .ifPresent(
+            path -> {
+              try {
+                Files.writeString(path, ScheduleCsv.of(model.sketch()));
+                report("The schedule is in " + path.getFileName() + ".");
+              } catch (IOException e) {
+                String why = String.valueOf(e.getMessage());
+                questions.tell(path.getFileName() + " cannot be written", List.of(why));
+              }
+            });
+  }
+
+  /** Puts a picture of the sketch on the clipboard. */
+  void copyFigure() {
+    commit();
+    PictureWindow.copy(model);
+    report("The figure is on the clipboard.");
   }
 
   Documents documents() {

@@ -10,6 +10,7 @@ import clampwright.paint.print.PdfPicture;
 import clampwright.paint.print.PngPicture;
 import clampwright.paint.print.SvgPicture;
 import java.nio.charset.StandardCharsets;
+import javafx.scene.image.Image;
 
 /**
  * A picture that leaves the program.
@@ -70,6 +71,12 @@ record Picture(Kind kind, Theme theme, double dpi, PictureFigure.Request request
   /** Colours, and lines as wide as the preset's type is large. */
   Palette palette() {
     return theme.palette().scaled(request.preset().scale());
+  }
+
+  /** The picture for the screen or the clipboard. */
+  Image image(Sketch sketch, double dpi) {
+    PngPicture.Pixels pixels = PngPicture.pixels(figure(sketch), palette(), dpi);
+    return ScreenImage.of(pixels.width(), pixels.height(), pixels.argb());
   }
 
   /** The file. */

@@ -34,6 +34,11 @@ final class SystemDialogs implements FilePrompt, Questions {
   }
 
   @Override
+  public Optional<Path> toExport(String title, String suggested) {
+    return prompt().toExport(title, suggested);
+  }
+
+  @Override
   public Unsaved unsaved(String name) {
     return questions().unsaved(name);
   }

@@ -4,6 +4,7 @@ import clampwright.store.SketchFile;
 import java.io.File;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Supplier;
 import javafx.stage.FileChooser;
@@ -32,6 +33,24 @@ final class SystemFilePrompt implements FilePrompt {
     chooser.setInitialFileName(suggested);
     File chosen = chooser.showSaveDialog(owner);
     return Optional.ofNullable(chosen).map(File::toPath).map(SystemFilePrompt::named);
+  }
+
+  @Override
+  public Optional<Path> toExport(String title, String suggested) {
+    String ending = suggested.substring(suggested.lastIndexOf('.'));
+    FileChooser chooser = chooser(title);
+    chooser
+        .getExtensionFilters()
+        .setAll(new ExtensionFilter(ending.substring(1).toUpperCase(Locale.ROOT), "*" + ending));
+    chooser.setInitialFileName(suggested);
+    File chosen = chooser.showSaveDialog(owner);
+    return Optional.ofNullable(chosen)
+        .map(File::toPath)
+        .map(
+            path ->
+                path.getFileName().toString().contains(".")
+                    ? path
+                    : path.resolveSibling(path.getFileName() + ending));
   }
 
   /** Some systems leave the ending out. */

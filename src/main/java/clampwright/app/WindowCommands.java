@@ -42,6 +42,11 @@ final class WindowCommands {
         Command.of("save", "Save", documents::save, "Shortcut+S"),
         Command.of("save-as", "Save as…", documents::saveAs, "Shortcut+Shift+S"),
         line(),
+        Command.of("export-figure", "Export figure…", window::exportFigure, "Shortcut+P"),
+        Command.of(
+            "export-schedule", "Export schedule…", window::exportSchedule, "Shortcut+Shift+P"),
+        Command.of("copy-figure", "Copy figure", window::copyFigure, "Shortcut+Shift+C"),
+        line(),
         Command.of("exit", "Close", window::close, "Shortcut+Q", "Shortcut+W"));
   }
 
@@ -151,6 +156,16 @@ final class WindowCommands {
         line(),
         Command.of("schedule", "Schedule", () -> window.drawer().show("Schedule"), "Shortcut+1"),
         Command.of("working", "Working", () -> window.drawer().show("Working"), "Shortcut+2"),
+        Command.of(
+            "what-matters",
+            "What matters",
+            () -> window.drawer().show("What matters"),
+            "Shortcut+3"),
+        Command.of(
+            "joint-diagram",
+            "Joint diagram",
+            () -> window.drawer().show("Joint diagram"),
+            "Shortcut+4"),
         Command.when(
             "drawer",
             () -> window.drawer().openProperty().get() ? "Close the drawer" : "Open the drawer",

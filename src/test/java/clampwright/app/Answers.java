@@ -26,6 +26,12 @@ final class Answers implements FilePrompt, Questions {
   }
 
   @Override
+  public Optional<Path> toExport(String title, String suggestedName) {
+    suggested.add(suggestedName);
+    return save;
+  }
+
+  @Override
   public Unsaved unsaved(String name) {
     asked.add(name);
     return unsaved;

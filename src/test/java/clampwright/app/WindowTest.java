@@ -398,6 +398,36 @@ class WindowTest {
   }
 
   @Test
+  void aCheckOpensItsWorking() {
+    robot.interact(
+        () -> ((javafx.scene.control.Button) robot.lookup("#check-parting").query()).fire());
+    WaitForAsyncUtils.waitForFxEvents();
+    assertEquals("Check: parting", title());
+  }
+
+  @Test
+  void theFigureIsExportedWithWhatWasChosen() throws java.io.IOException {
+    Path file = folder.resolve("figure-" + hashCode() + ".png");
+    answers.save = Optional.of(file);
+    press(KeyCode.SHORTCUT, KeyCode.P);
+    assertTrue(isShown("#picture-preview"));
+    robot.clickOn("#picture-show-ladder");
+    robot.clickOn("#picture-save");
+    byte[] bytes = java.nio.file.Files.readAllBytes(file);
+    assertEquals("PNG", new String(bytes, 1, 3, java.nio.charset.StandardCharsets.US_ASCII));
+    assertEquals(List.of("Pump cover.png"), answers.suggested);
+    assertFalse(isShown("#picture-preview"));
+  }
+
+  @Test
+  void theScheduleIsExported() throws java.io.IOException {
+    Path file = folder.resolve("schedule-" + hashCode() + ".csv");
+    answers.save = Optional.of(file);
+    press(KeyCode.SHORTCUT, KeyCode.SHIFT, KeyCode.P);
+    assertEquals(5, java.nio.file.Files.readAllLines(file).size());
+  }
+
+  @Test
   void theDrawerClosesAndOpens() {
     robot.clickOn("#close-drawer");
     assertFalse(isShown("#schedule-1"));

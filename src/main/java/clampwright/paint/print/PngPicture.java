@@ -44,8 +44,29 @@ public final class PngPicture {
     }
   }
 
+  /**
+   * The picture's pixels.
+   *
+   * @param width [px]
+   * @param height [px]
+   * @param argb row by row, 0xAARRGGBB
+   */
+  public record Pixels(int width, int height, int[] argb) {}
+
+  /** The picture as pixels, for a screen. */
+  public static Pixels pixels(Figure figure, Palette palette, double dpi) {
+    BufferedImage image = image(figure, palette, dpi);
+    int width = image.getWidth();
+    int height = image.getHeight();
+    int[] argb = image.getRGB(0, 0, width, height, null, 0, width);
+    for (int i = 0; i < argb.length; i++) {
+      argb[i] |= 0xFF000000;
+    }
+    return new Pixels(width, height, argb);
+  }
+
   /** The picture as an image. */
-  public static BufferedImage image(Figure figure, Palette palette, double dpi) {
+  static BufferedImage image(Figure figure, Palette palette, double dpi) {
     double scale = dpi / MM_PER_INCH;
     long width = Math.round(figure.width() * scale);
     long height = Math.round(figure.height() * scale);

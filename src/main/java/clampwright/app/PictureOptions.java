@@ -1,0 +1,117 @@
+package clampwright.app;
+
+import clampwright.figure.PictureFigure;
+import clampwright.figure.Preset;
+import clampwright.figure.Show;
+import java.util.EnumMap;
+import java.util.EnumSet;
+import java.util.Map;
+import java.util.Set;
+import java.util.stream.Stream;
+import javafx.scene.control.CheckBox;
+import javafx.scene.control.ComboBox;
+import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.VBox;
+import javafx.util.StringConverter;
+
+/** What is asked of a picture, as controls. */
+final class PictureOptions extends VBox {
+  private static final double SCREEN = 96;
+
+  private final ComboBox<Preset> preset = box(Preset.values());
+  private final ComboBox<Picture.Theme> theme = box(Picture.Theme.values());
+  private final ComboBox<Picture.Kind> kind = box(Picture.Kind.values());
+  private final ComboBox<Integer> dpi = new ComboBox<>();
+  private final TextField caption = new TextField();
+  private final Map<Show, CheckBox> shows = new EnumMap<>(Show.class);
+
+  /**
+   * The controls.
+   *
+   * @param changed called after each change
+   */
+  PictureOptions(Runnable changed) {
+    getStyleClass().add("picture-options");
+    preset.setConverter(named(Preset::title));
+    preset.setValue(Preset.PAGE);
+    theme.setConverter(named(Picture.Theme::title));
+    theme.setValue(Picture.Theme.LIGHT);
+    kind.setConverter(named(Picture.Kind::name));
+    kind.setValue(Picture.Kind.PNG);
+    dpi.getItems().setAll(96, 150, 200, 300, 600);
+    dpi.setConverter(named(value -> value + " dpi"));
+    dpi.setValue(300);
+    preset.setId("picture-preset");
+    theme.setId("picture-theme");
+    kind.setId("picture-kind");
+    dpi.setId("picture-dpi");
+    caption.setId("picture-caption");
+    caption.setPromptText("a sentence below the picture");
+    GridPane grid = new GridPane();
+    grid.setHgap(10);
+    grid.setVgap(8);
+    grid.addRow(0, new Label("For"), preset);
+    grid.addRow(1, new Label("Colours"), theme);
+    grid.addRow(2, new Label("File"), kind);
+    grid.addRow(3, new Label("Resolution"), dpi);
+    grid.addRow(4, new Label("Caption"), caption);
+    getChildren().add(grid);
+    for (Show show : Show.values()) {
+      CheckBox check = new CheckBox(show.title());
+      check.setId("picture-show-" + show.word());
+      check.setSelected(Show.USUAL.contains(show));
+      check.setOnAction(event -> changed.run());
+      shows.put(show, check);
+      getChildren().add(check);
+    }
+    Stream.of(preset, theme, kind, dpi)
+        .forEach(
+            box -> {
+              box.setMaxWidth(Double.MAX_VALUE);
+              box.valueProperty().addListener(observable -> follow(changed));
+            });
+    caption.textProperty().addListener(observable -> changed.run());
+  }
+
+  private static <T> ComboBox<T> box(T[] values) {
+    ComboBox<T> box = new ComboBox<>();
+    box.getItems().setAll(values);
+    return box;
+  }
+
+  private static <T> StringConverter<T> named(java.util.function.Function<T, String> name) {
+    return new StringConverter<>() {
+      @Override
+      public String toString(T value) {
+        return value == null ? "" : name.apply(value);
+      }
+
+      @Override
+      public T fromString(String text) {
+        throw new UnsupportedOperationException("chosen from the list only");
+      }
+    };
+  }
+
+  private void follow(Runnable changed) {
+    dpi.setDisable(kind.getValue() != Picture.Kind.PNG);
+    changed.run();
+  }
+
+  /** The picture that is asked for, of a load case. */
+  Picture picture(int loadCase) {
+    Set<Show> shown = EnumSet.noneOf(Show.class);
+    shows.forEach(
+        (show, check) -> {
+          if (check.isSelected()) {
+            shown.add(show);
+          }
+        });
+    PictureFigure.Request request =
+        new PictureFigure.Request(preset.getValue(), shown, caption.getText(), loadCase);
+    double resolution = kind.getValue() == Picture.Kind.PNG ? dpi.getValue() : SCREEN;
+    return new Picture(kind.getValue(), theme.getValue(), resolution, request);
+  }
+}
