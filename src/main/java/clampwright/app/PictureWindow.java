@@ -117,7 +117,7 @@ final class PictureWindow {
   private void follow() {
     Picture picture = picture();
     double width = picture.request().preset().width();
-    double height = picture.request().preset().height();
+    double height = picture.request().preset().height(picture.request().shown());
     double shown = Math.min(WIDE / width, TALL / height) * MM_PER_INCH;
     preview.setImage(picture.image(model.sketch(), shown * stage.getOutputScaleX()));
   }

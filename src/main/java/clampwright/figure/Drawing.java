@@ -8,6 +8,9 @@ final class Drawing {
   private final Sheet sheet;
   private final List<Mark> marks = new ArrayList<>();
 
+  /** Where words lie already. */
+  private final List<WordBox> words = new ArrayList<>();
+
   Drawing(Sheet sheet) {
     this.sheet = sheet;
   }
@@ -27,6 +30,36 @@ final class Drawing {
 
   void add(Mark mark) {
     marks.add(mark);
+    if (mark instanceof Mark.Pill pill) {
+      words.add(WordBox.of(pill));
+    } else if (mark instanceof Mark.Text text) {
+      words.add(WordBox.of(text));
+    }
+  }
+
+  /** Keeps a box between two corners free of the words that look for a place of their own. */
+  void reserve(Point one, Point other) {
+    words.add(
+        new WordBox(
+            Math.min(one.x(), other.x()),
+            Math.min(one.y(), other.y()),
+            Math.max(one.x(), other.x()),
+            Math.max(one.y(), other.y())));
+  }
+
+  /**
+   * Draws the first of these texts that lies on the sheet and over no word drawn before; where none
+   * does, the first.
+   */
+  void firstFree(List<Mark.Text> candidates) {
+    for (Mark.Text candidate : candidates) {
+      WordBox box = WordBox.of(candidate);
+      if (box.isOn(sheet) && words.stream().noneMatch(box::overlaps)) {
+        add(candidate);
+        return;
+      }
+    }
+    add(candidates.get(0));
   }
 
   void line(Tag tag, Point from, Point to) {
@@ -57,7 +90,7 @@ final class Drawing {
       Mark.Anchor anchor,
       double size,
       Mark.Weight weight) {
-    marks.add(new Mark.Text(tag, new Point(x, y), text, anchor, size, weight));
+    add(new Mark.Text(tag, new Point(x, y), text, anchor, size, weight));
   }
 
   void disc(Tag tag, Point centre, double radius, boolean filled) {

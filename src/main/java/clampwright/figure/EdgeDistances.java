@@ -8,6 +8,7 @@ import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
+import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 
@@ -76,16 +77,15 @@ final class EdgeDistances {
     double width = TextWidth.of(text, SIZE, Mark.Weight.BOLD);
     double nut = drawing.sheet().x(side * layout.nutReach());
     boolean room = Math.abs(edge - nut) > width + 3 && side * (edge - nut) > 0;
-    double x = room ? (edge + nut) / 2 : edge + side * 1.5;
-    double base = room ? y - 1 : y + 0.36 * SIZE;
     Mark.Anchor beyond = side < 0 ? Mark.Anchor.END : Mark.Anchor.START;
-    drawing.text(
-        Tag.of(Role.DIMENSION, part),
-        x,
-        base,
-        text,
-        room ? Mark.Anchor.MIDDLE : beyond,
-        SIZE,
-        Mark.Weight.BOLD);
+    Mark.Text between = label(part, (edge + nut) / 2, y - 1, text, Mark.Anchor.MIDDLE);
+    Mark.Text outside = label(part, edge + side * 1.5, y + 0.36 * SIZE, text, beyond);
+    Mark.Text below = label(part, (edge + nut) / 2, y + 1.1 * SIZE, text, Mark.Anchor.MIDDLE);
+    drawing.firstFree(room ? List.of(between, below, outside) : List.of(outside, below, between));
+  }
+
+  private static Mark.Text label(Part part, double x, double y, String text, Mark.Anchor anchor) {
+    Tag tag = Tag.of(Role.DIMENSION, part);
+    return new Mark.Text(tag, new Point(x, y), text, anchor, SIZE, Mark.Weight.BOLD);
   }
 }

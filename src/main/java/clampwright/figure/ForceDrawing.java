@@ -8,6 +8,7 @@ import clampwright.joint.Sketch;
 import clampwright.mechanics.AssemblyPreload;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
+import java.util.List;
 import java.util.OptionalDouble;
 
 /**
@@ -35,10 +36,28 @@ final class ForceDrawing {
     if (layout.stack() == 0) {
       return;
     }
+    reserve();
     if (load.axialMax() != 0 || interactive) {
       load();
     }
     preload();
+  }
+
+  /** Words keep clear of the bolt's ends and of the arrows. */
+  private void reserve() {
+    double rim = layout.joint().fastener().head().rim() / 2;
+    drawing.reserve(drawing.at(-rim, layout.top()), drawing.at(rim, 0));
+    drawing.reserve(
+        drawing.at(-layout.nutReach(), layout.stack()),
+        drawing.at(layout.nutReach(), layout.bottom()));
+    double axis = drawing.sheet().axisX();
+    double head = drawing.sheet().y(layout.top());
+    drawing.reserve(new Point(axis - 0.9, head - 8), new Point(axis + 0.9, head));
+    double x = drawing.sheet().x(0.72 * layout.reach());
+    double top = drawing.sheet().y(0);
+    double bottom = drawing.sheet().y(layout.stack());
+    drawing.reserve(new Point(x - 1, top - CLEAR - LONG), new Point(x + 1, top));
+    drawing.reserve(new Point(x - 1, bottom), new Point(x + 1, bottom + CLEAR + LONG));
   }
 
   private void load() {
@@ -51,16 +70,20 @@ final class ForceDrawing {
     foot(Feature.LOAD_ENTERS, new Point(x, top), enters());
     foot(Feature.LOAD_LEAVES, new Point(x, bottom), leaves());
     String text = Quantities.text(Dimension.FORCE, sketch.units(), Math.abs(load.axialMax()));
-    double rim = drawing.sheet().x(layout.joint().fastener().head().rim() / 2);
-    boolean room = x - rim > TextWidth.of(text, SIZE, Mark.Weight.BOLD) + 4;
-    drawing.text(
-        Tag.of(Role.LOAD, Part.LOAD),
-        room ? x - 2 : x + 2,
-        top - 5,
-        text,
-        room ? Mark.Anchor.END : Mark.Anchor.START,
-        SIZE,
-        Mark.Weight.BOLD);
+    Tag tag = Tag.of(Role.LOAD, Part.LOAD);
+    double y = top - 5;
+    drawing.firstFree(
+        List.of(
+            label(tag, x - 2, y, text, Mark.Anchor.END, SIZE),
+            label(tag, x + 2, y, text, Mark.Anchor.START, SIZE),
+            label(tag, x, top - LONG - 1.2, text, Mark.Anchor.MIDDLE, SIZE),
+            label(tag, x + 2, bottom + 6, text, Mark.Anchor.START, SIZE),
+            label(tag, x - 2, bottom + 6, text, Mark.Anchor.END, SIZE)));
+  }
+
+  private static Mark.Text label(
+      Tag tag, double x, double y, String text, Mark.Anchor anchor, double size) {
+    return new Mark.Text(tag, new Point(x, y), text, anchor, size, Mark.Weight.BOLD);
   }
 
   /** Where the load enters [z]: under the head, or in the middle of a part. */
@@ -112,15 +135,18 @@ final class ForceDrawing {
     }
     String text =
         "preload " + Quantities.text(Dimension.FORCE, sketch.units(), force.getAsDouble());
-    double callOuts = CallOuts.LEFT + CallOuts.WIDTH + 4;
-    boolean room = x - TextWidth.of(text, 2.9, Mark.Weight.BOLD) - 2 > callOuts;
-    drawing.text(
-        Tag.of(Role.PRELOAD, Part.PRELOAD),
-        room ? x - 2 : x,
-        room ? top - 3.6 : top - 8,
-        text,
-        room ? Mark.Anchor.END : Mark.Anchor.MIDDLE,
-        2.9,
-        Mark.Weight.BOLD);
+    Tag words = Tag.of(Role.PRELOAD, Part.PRELOAD);
+    double y = top - 3.6;
+    double end = drawing.sheet().y(layout.bottom()) + 5;
+    drawing.firstFree(
+        List.of(
+            label(words, x - 2, y, text, Mark.Anchor.END, 2.9),
+            label(words, x, top - 8, text, Mark.Anchor.MIDDLE, 2.9),
+            label(words, x + 2, y, text, Mark.Anchor.START, 2.9),
+            label(words, x - 2, top - 8, text, Mark.Anchor.END, 2.9),
+            label(words, x + 2, top - 8, text, Mark.Anchor.START, 2.9),
+            label(words, x + 2, end, text, Mark.Anchor.START, 2.9),
+            label(words, x - 2, end, text, Mark.Anchor.END, 2.9),
+            label(words, x, end + 4.5, text, Mark.Anchor.MIDDLE, 2.9)));
   }
 }

@@ -72,10 +72,10 @@ public final class JointDiagramFigure {
       lines(most, Role.BOLT_LINE_FAINT, Role.MEMBERS_LINE_FAINT);
     }
     lines(nominal, Role.BOLT_LINE, Role.MEMBERS_LINE);
+    legend();
     preloadMark(nominal);
     parting(nominal);
     load(nominal);
-    legend();
   }
 
   /** Stretch of the bolt at its preload [mm]. */
@@ -156,14 +156,25 @@ public final class JointDiagramFigure {
     drawing.line(
         Tag.of(Role.LEADER, Part.PRELOAD), new Point(at(0, preload).x(), point.y()), point);
     drawing.disc(tag, point, 0.8, true);
-    drawing.text(tag, point.x() - 1.5, point.y() - 1.4, "preload, nominal", Mark.Anchor.END, SIZE);
+    String text = "preload, nominal";
+    drawing.firstFree(
+        List.of(
+            label(tag, point.x() - 1.5, point.y() - 1.4, text, Mark.Anchor.END),
+            label(tag, point.x(), point.y() - 2.4, text, Mark.Anchor.MIDDLE),
+            label(tag, point.x() + 2.5, point.y() + 3.2, text, Mark.Anchor.START),
+            label(tag, point.x() + 2, point.y() - 3, text, Mark.Anchor.START),
+            label(tag, point.x() - 1.5, point.y() + 5, text, Mark.Anchor.END)));
   }
 
   private void parting(double preload) {
     Point point = at(separation(preload), 0);
     Tag tag = Tag.of(Role.RUNG, Part.LOAD);
     drawing.disc(tag, point, 0.8, false);
-    drawing.text(tag, point.x() + 1.5, point.y() - 1.4, "parts", Mark.Anchor.START, SIZE);
+    drawing.firstFree(
+        List.of(
+            label(tag, point.x() + 1.5, point.y() - 1.4, "parts", Mark.Anchor.START),
+            label(tag, point.x() + 1.5, point.y() - 5, "parts", Mark.Anchor.START),
+            label(tag, point.x() - 1.5, point.y() - 1.4, "parts", Mark.Anchor.END)));
   }
 
   /** The outside load between member line and bolt line, at the stretch it brings. */
@@ -178,15 +189,20 @@ public final class JointDiagramFigure {
     Point upper = at(x, boltForce);
     Point lower = at(x, boltForce - axial);
     drawing.add(new Mark.Arrow(tag, lower, upper, true, true));
+    String text = "load " + Quantities.text(Dimension.FORCE, sketch.units(), axial);
+    double middle = (upper.y() + lower.y()) / 2 + 1;
     boolean onAxis = lower.y() + 5 > at(0, 0).y();
-    drawing.text(
-        tag,
-        upper.x() + (onAxis ? 2 : -2),
-        onAxis ? (upper.y() + lower.y()) / 2 + 1 : lower.y() + 4,
-        "load " + Quantities.text(Dimension.FORCE, sketch.units(), axial),
-        onAxis ? Mark.Anchor.START : Mark.Anchor.END,
-        SIZE,
-        Mark.Weight.BOLD);
+    Mark.Text below = label(tag, upper.x() - 2, lower.y() + 4, text, Mark.Anchor.END);
+    Mark.Text beside = label(tag, upper.x() + 2, middle, text, Mark.Anchor.START);
+    Mark.Text before = label(tag, upper.x() - 2, middle, text, Mark.Anchor.END);
+    Mark.Text above = label(tag, upper.x() + 2, upper.y() - 2, text, Mark.Anchor.START);
+    drawing.firstFree(
+        onAxis ? List.of(beside, before, above) : List.of(below, above, beside, before));
+  }
+
+  private static Mark.Text label(Tag tag, double x, double y, String text, Mark.Anchor anchor) {
+    Mark.Weight weight = tag.role() == Role.LOAD ? Mark.Weight.BOLD : Mark.Weight.REGULAR;
+    return new Mark.Text(tag, new Point(x, y), text, anchor, SIZE, weight);
   }
 
   private void legend() {

@@ -20,6 +20,7 @@ public final class PictureFigure {
   private static final double CAPTION_SIZE = 3.3;
   private static final double CAUTION_SIZE = 2.3;
   private static final double LADDER = 44;
+  private static final double UNDER = 68;
   private static final double SHORTEST_LADDER = 24;
 
   private final Sketch sketch;
@@ -48,7 +49,7 @@ public final class PictureFigure {
     this.assessment = assessment;
     this.request = request;
     width = request.preset().width() / request.preset().scale();
-    height = request.preset().height() / request.preset().scale();
+    height = request.preset().height(request.shown()) / request.preset().scale();
   }
 
   /** Draws it. An unsolved joint shows its parts and the reasons. */
@@ -58,7 +59,10 @@ public final class PictureFigure {
     Preset preset = request.preset();
     Figure drawn = new Figure(sketch.name(), picture.width, picture.height, picture.marks);
     return new Figure(
-        sketch.name(), preset.width(), preset.height(), new Moved(0, 0, preset.scale()).of(drawn));
+        sketch.name(),
+        preset.width(),
+        preset.height(request.shown()),
+        new Moved(0, 0, preset.scale()).of(drawn));
   }
 
   private void draw() {
@@ -69,7 +73,11 @@ public final class PictureFigure {
     double bottom = words(left, right, height - MARGIN - inset);
     Optional<Solved> solved =
         assessment instanceof Solved found ? Optional.of(found) : Optional.empty();
-    if (solved.isPresent() && hasSide()) {
+    boolean narrow = request.preset().isNarrow();
+    if (solved.isPresent() && hasSide() && narrow) {
+      bottom -= UNDER;
+      under(solved.get(), left, bottom, right);
+    } else if (solved.isPresent() && hasSide()) {
       right -= SIDE;
       double below = top + (request.preset().isFramed() ? TitleBlock.TALL : 0);
       side(solved.get(), right + 4, below, bottom);
@@ -106,6 +114,21 @@ public final class PictureFigure {
             .filter(mark -> mark.role() != Role.CAPTION)
             .toList();
     place(new Figure(figure.title(), wide, tall, shown), x, y);
+  }
+
+  /** Readouts and ladder side by side below the section. */
+  private void under(Solved solved, double left, double top, double right) {
+    double wide = (right - left - 6) / 2;
+    double x = left;
+    if (request.shown().contains(Show.READOUTS)) {
+      Figure readouts = ReadoutsFigure.of(sketch, solved, request.loadCase(), wide);
+      double scale = Math.min(1, (UNDER - 3) / readouts.height());
+      marks.addAll(new Moved(x, top, scale).of(readouts));
+      x = right - wide;
+    }
+    if (request.shown().contains(Show.LADDER)) {
+      place(LoadLadderFigure.of(sketch, solved, request.loadCase(), wide, LADDER), x, top + 4);
+    }
   }
 
   /** Readouts and ladder, one below the other, made smaller where there is not room enough. */

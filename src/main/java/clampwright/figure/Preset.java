@@ -1,5 +1,7 @@
 package clampwright.figure;
 
+import java.util.Set;
+
 /** Sizes of a picture by use. */
 public enum Preset {
   /** A slide of 16:9. */
@@ -10,6 +12,9 @@ public enum Preset {
   PAGE("page", "page width, 170 mm", 170, 115, 1, false),
   /** A whole sheet with frame and title block. */
   SHEET("sheet", "A4 sheet with title block", 297, 210, 1, true);
+
+  private static final double BELOW = 46;
+  private static final double DIAGRAM = 31;
 
   private final String word;
   private final String title;
@@ -42,9 +47,18 @@ public enum Preset {
     return width;
   }
 
-  /** Height of the picture [mm]. */
-  public double height() {
-    return height;
+  /** Height of the picture [mm]; a text column grows with what stands below one another in it. */
+  public double height(Set<Show> shown) {
+    if (this != COLUMN) {
+      return height;
+    }
+    boolean below = shown.contains(Show.READOUTS) || shown.contains(Show.LADDER);
+    return height + (below ? BELOW : 0) + (shown.contains(Show.DIAGRAM) ? DIAGRAM : 0);
+  }
+
+  /** Whether readouts and ladder stand below the section, for want of room beside it. */
+  boolean isNarrow() {
+    return this == COLUMN;
   }
 
   /** How much larger type is than on the screen. */

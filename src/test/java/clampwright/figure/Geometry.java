@@ -32,6 +32,14 @@ final class Geometry {
     return ((Mark.Hatch) mark).strokes();
   }
 
+  /** The box of a text or a pill. */
+  static double[] boxOf(Mark mark) {
+    if (mark instanceof Mark.Pill pill) {
+      return new double[] {pill.x(), pill.y(), pill.x() + pill.width(), pill.y() + pill.height()};
+    }
+    return box((Mark.Text) mark);
+  }
+
   /** Left, top, right, bottom; letters reach about 0.73 above and 0.2 below the base line. */
   static double[] box(Mark.Text text) {
     double width = TextWidth.of(text.text(), text.size(), text.weight());

@@ -72,6 +72,36 @@ class PictureFigureTest {
     }
   }
 
+  /** No word of a picture lies over another, nor over a call-out. */
+  @ParameterizedTest
+  @MethodSource("samples")
+  void wordsNeverOverlap(Sketch sketch) {
+    for (Preset preset : Preset.values()) {
+      checkApart(figure(sketch, preset, EnumSet.allOf(Show.class)));
+      checkApart(figure(sketch, preset, Show.USUAL));
+    }
+  }
+
+  private static void checkApart(Figure figure) {
+    List<Mark> words =
+        figure.marks().stream()
+            .filter(
+                mark ->
+                    mark instanceof Mark.Pill
+                        || mark instanceof Mark.Text text && !text.text().isEmpty())
+            .toList();
+    for (int i = 0; i < words.size(); i++) {
+      double[] a = Geometry.boxOf(words.get(i));
+      for (int j = 0; j < i; j++) {
+        double[] b = Geometry.boxOf(words.get(j));
+        boolean apart = a[0] >= b[2] || b[0] >= a[2] || a[1] >= b[3] || b[1] >= a[3];
+        Mark one = words.get(i);
+        Mark other = words.get(j);
+        assertTrue(apart, () -> figure.width() + ": " + one + " over " + other);
+      }
+    }
+  }
+
   @ParameterizedTest
   @EnumSource(Show.class)
   void whatIsNotAskedIsNotDrawn(Show show) {

@@ -100,7 +100,7 @@ class PicturesTest {
     Document document = parsed(svg(figure));
     Element root = document.getDocumentElement();
     assertEquals("85mm", root.getAttribute("width"));
-    assertEquals("0 0 85 78", root.getAttribute("viewBox"));
+    assertEquals("0 0 85 155", root.getAttribute("viewBox"));
     assertEquals(sketch.name(), document.getElementsByTagName("title").item(0).getTextContent());
     List<String> found = new ArrayList<>();
     NodeList texts = document.getElementsByTagName("text");
@@ -149,7 +149,9 @@ class PicturesTest {
       ImageReader reader = ImageIO.getImageReaders(in).next();
       reader.setInput(in);
       assertEquals(Math.round(preset.width() / MM_PER_INCH * 150), reader.getWidth(0));
-      assertEquals(Math.round(preset.height() / MM_PER_INCH * 150), reader.getHeight(0));
+      assertEquals(
+          Math.round(preset.height(EnumSet.allOf(Show.class)) / MM_PER_INCH * 150),
+          reader.getHeight(0));
       assertEquals(150 / 0.0254, perMetre(reader.getImageMetadata(0)), 1);
       reader.dispose();
     }
