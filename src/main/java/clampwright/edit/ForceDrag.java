@@ -68,20 +68,11 @@ record ForceDrag(Sketch start, Grab grab, Part part, int loadCase, int outwards,
         preload ? "Preload" : "Axial load");
   }
 
-  /** A steady load stays steady; the least of another never gets above the greatest. */
   private Sketch loaded(double value) {
     return start.withJoint(
         joint ->
             joint.withService(
-                joint
-                    .service()
-                    .withLoad(
-                        loadCase,
-                        load -> {
-                          boolean steady = load.axialMin() == load.axialMax();
-                          double least = steady ? value : Math.min(load.axialMin(), value);
-                          return load.withAxial(least, value);
-                        })));
+                joint.service().withLoad(loadCase, load -> load.withGreatest(value))));
   }
 
   /** The target keeps its kind: a torque becomes the torque that reaches the force. */

@@ -67,6 +67,15 @@ public record LoadCase(
         name, axialMin, axialMax, shear, introduction, friction, slipFaces, temperature);
   }
 
+  /**
+   * With another greatest axial load: a steady load stays steady, and the least of another never
+   * gets above the greatest.
+   */
+  public LoadCase withGreatest(double axialMax) {
+    boolean steady = axialMin == this.axialMax;
+    return withAxial(steady ? axialMax : Math.min(axialMin, axialMax), axialMax);
+  }
+
   public LoadCase withShear(double shear) {
     return new LoadCase(
         name, axialMin, axialMax, shear, introduction, friction, slipFaces, temperature);

@@ -81,14 +81,7 @@ final class LoadSection extends Section {
         "Axial load",
         Dimension.FORCE,
         sketch -> load(model, sketch).axialMax(),
-        (sketch, value) ->
-            withLoad(
-                model,
-                sketch,
-                load -> {
-                  boolean steady = load.axialMin() == load.axialMax();
-                  return load.withAxial(steady ? value : Math.min(load.axialMin(), value), value);
-                }));
+        (sketch, value) -> withLoad(model, sketch, load -> load.withGreatest(value)));
   }
 
   static SketchNumber introduction(SketchModel model) {
