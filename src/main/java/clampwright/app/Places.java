@@ -22,6 +22,7 @@ final class Places {
       case NUT_CONE -> "nut's cone";
       case LOAD -> "load";
       case PRELOAD -> "preload";
+      case NOTE -> "note";
     };
   }
 

@@ -2,6 +2,7 @@ package clampwright.app;
 
 import clampwright.edit.Change;
 import clampwright.edit.End;
+import clampwright.edit.Noting;
 import clampwright.edit.SketchModel;
 import clampwright.edit.Stacking;
 import clampwright.joint.Sketch;
@@ -59,6 +60,11 @@ final class StackSteps {
 
   void removeWasher(End end) {
     make(sketch -> Stacking.washerRemoved(sketch, end));
+  }
+
+  /** A note at the selected part, ready for its words. */
+  void addNote() {
+    make(sketch -> Noting.added(sketch, model.selection()));
   }
 
   private void make(Function<Sketch, Change> change) {

@@ -83,6 +83,11 @@ final class WindowCommands {
             "Alt+Down"));
   }
 
+  private void addNote() {
+    stack.addNote();
+    window.section().openCardOfSelection();
+  }
+
   private Command element(String id, String text, Runnable action, String keys) {
     return Command.when(id, () -> text, stack::isElementSelected, action, keys);
   }
@@ -90,6 +95,7 @@ final class WindowCommands {
   private void addSketch() {
     commands.add(
         "Sketch",
+        Command.of("add-note", "Add note", this::addNote, "Shortcut+M"),
         Command.of("insert-layer", "Insert layer", stack::insertLayer, "Shortcut+L", "Insert"),
         line(),
         Command.of(

@@ -15,7 +15,7 @@ import java.util.Optional;
  * from under the head.
  */
 public sealed interface Drag
-    permits LengthDrag, OrderDrag, FlankDrag, ShankDrag, LayerDrag, ForceDrag, PlaneDrag {
+    permits LengthDrag, OrderDrag, FlankDrag, ShankDrag, LayerDrag, ForceDrag, PlaneDrag, NoteDrag {
 
   /**
    * Takes hold of a feature.
@@ -34,6 +34,7 @@ public sealed interface Drag
       case BODY -> part.isElement() ? Optional.of(OrderDrag.of(sketch, part, grab)) : none();
       case FLANK -> FlankDrag.of(sketch, part, grab);
       case SHANK_EDGE -> ShankDrag.of(sketch, grab);
+      case NOTE -> Optional.of(new NoteDrag(sketch, grab, part.index()));
       case PRELOAD_SIZE -> ForceDrag.preload(sketch, grab);
       case LOAD_AT_HEAD, LOAD_AT_NUT, LOAD_ENTERS, LOAD_LEAVES ->
           load(sketch, 0, feature, fromAxis, z);

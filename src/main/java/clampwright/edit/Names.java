@@ -22,6 +22,7 @@ public final class Names {
       case NUT_CONE -> "nut's cone";
       case LOAD -> "load";
       case PRELOAD -> "preload";
+      case NOTE -> "note";
       case ELEMENT -> of(joint.elements().get(part.index()), part.index());
     };
   }

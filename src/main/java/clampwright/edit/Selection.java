@@ -22,6 +22,9 @@ final class Selection extends SimpleObjectProperty<Part> {
   }
 
   static boolean exists(Part part, Sketch sketch) {
+    if (part.isNote()) {
+      return part.index() < sketch.notes().size();
+    }
     return !part.isElement() || part.index() < sketch.joint().elements().size();
   }
 

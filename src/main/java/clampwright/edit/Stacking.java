@@ -63,7 +63,14 @@ public final class Stacking {
   }
 
   private static Sketch restacked(Sketch sketch, List<Element> elements, IntUnaryOperator place) {
-    return sketch.withJoint(joint -> Restacking.of(joint, elements, place));
+    return restacked(sketch, elements, -1, place);
+  }
+
+  private static Sketch restacked(
+      Sketch sketch, List<Element> elements, int gone, IntUnaryOperator place) {
+    return sketch
+        .withJoint(joint -> Restacking.of(joint, elements, place))
+        .withNotes(Noting.followed(sketch.notes(), gone, place));
   }
 
   /** The stack without an element; the one that takes its place is selected. */
@@ -73,7 +80,7 @@ public final class Stacking {
     Part then =
         elements.isEmpty() ? Part.JOINT : Part.element(Math.min(index, elements.size() - 1));
     String name = "Delete " + Names.of(sketch.joint(), Part.element(index));
-    return new Change(name, restacked(sketch, elements, i -> i > index ? i - 1 : i), then);
+    return new Change(name, restacked(sketch, elements, index, i -> i > index ? i - 1 : i), then);
   }
 
   /** An element taken out and put in again at another place. */

@@ -66,6 +66,9 @@ public enum Role {
   /** A bin of a histogram whose joints hold, or fail. */
   BIN_HOLDS,
   BIN_FAILS,
+  /** A note of the reader's own, its leader, and the plate under its words. */
+  NOTE,
+  NOTE_PLATE,
   /** Frame of the selected part; its grips; what lies under the pointer; an insertion grip. */
   SELECTION,
   GRIP,

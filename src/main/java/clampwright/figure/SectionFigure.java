@@ -55,6 +55,7 @@ public final class SectionFigure {
     new Dimensions(drawing, layout, sketch).draw();
     new EdgeDistances(drawing, layout, sketch, load(sketch, options)).draw();
     new ForceDrawing(drawing, layout, sketch, load(sketch, options)).draw(options.interactive());
+    new NoteDrawing(drawing, layout, sketch).draw();
     captions(drawing);
     if (count == 0) {
       beginning(drawing, layout);

@@ -26,6 +26,8 @@ public enum Feature {
   LOAD_ENTERS,
   /** Where the load leaves: drags to another part. */
   LOAD_LEAVES,
+  /** The words of a note: drags them. */
+  NOTE,
   /** The preload arrow: drags the preload. */
   PRELOAD_SIZE
 }

@@ -7,7 +7,7 @@ import java.util.Objects;
  * same thing.
  *
  * @param kind what it is
- * @param index of the element, 0 at the head; −1 for the other kinds
+ * @param index of the element, 0 at the head, or of the note; −1 for the other kinds
  */
 public record Part(Kind kind, int index) {
 
@@ -23,7 +23,9 @@ public record Part(Kind kind, int index) {
     HEAD_CONE,
     NUT_CONE,
     LOAD,
-    PRELOAD
+    PRELOAD,
+    /** A note of the reader's own, by its index. */
+    NOTE
   }
 
   public static final Part JOINT = new Part(Kind.JOINT, -1);
@@ -37,13 +39,22 @@ public record Part(Kind kind, int index) {
 
   public Part {
     Objects.requireNonNull(kind, "kind");
-    if (kind == Kind.ELEMENT ? index < 0 : index != -1) {
+    boolean counted = kind == Kind.ELEMENT || kind == Kind.NOTE;
+    if (counted ? index < 0 : index != -1) {
       throw new IllegalArgumentException("index " + index + " does not fit a part of kind " + kind);
     }
   }
 
   public static Part element(int index) {
     return new Part(Kind.ELEMENT, index);
+  }
+
+  public static Part note(int index) {
+    return new Part(Kind.NOTE, index);
+  }
+
+  public boolean isNote() {
+    return kind == Kind.NOTE;
   }
 
   public boolean isElement() {

@@ -1,6 +1,8 @@
 package clampwright.joint;
 
 import clampwright.quantity.UnitSystem;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Objects;
 import java.util.function.UnaryOperator;
 
@@ -10,20 +12,27 @@ import java.util.function.UnaryOperator;
  * @param name of the sketch, as it stands above the drawing
  * @param joint what is sketched
  * @param units in which the reader sees it; the joint itself never changes with them
+ * @param notes the reader's own words at its parts
  */
-public record Sketch(String name, Joint joint, UnitSystem units) {
+public record Sketch(String name, Joint joint, UnitSystem units, List<Note> notes) {
   public Sketch {
     Objects.requireNonNull(name, "name");
     Objects.requireNonNull(joint, "joint");
     Objects.requireNonNull(units, "units");
+    notes = List.copyOf(notes);
+  }
+
+  /** A sketch without notes. */
+  public Sketch(String name, Joint joint, UnitSystem units) {
+    this(name, joint, units, List.of());
   }
 
   public Sketch withName(String name) {
-    return new Sketch(name, joint, units);
+    return new Sketch(name, joint, units, notes);
   }
 
   public Sketch withJoint(Joint joint) {
-    return new Sketch(name, joint, units);
+    return new Sketch(name, joint, units, notes);
   }
 
   public Sketch withJoint(UnaryOperator<Joint> change) {
@@ -31,6 +40,17 @@ public record Sketch(String name, Joint joint, UnitSystem units) {
   }
 
   public Sketch withUnits(UnitSystem units) {
-    return new Sketch(name, joint, units);
+    return new Sketch(name, joint, units, notes);
+  }
+
+  public Sketch withNotes(List<Note> notes) {
+    return new Sketch(name, joint, units, notes);
+  }
+
+  /** The sketch with one note changed. */
+  public Sketch withNote(int index, UnaryOperator<Note> change) {
+    List<Note> changed = new ArrayList<>(notes);
+    changed.set(index, change.apply(changed.get(index)));
+    return withNotes(changed);
   }
 }

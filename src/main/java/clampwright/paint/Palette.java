@@ -110,6 +110,8 @@ public final class Palette {
     put(Role.MEMBERS_LINE_FAINT, new Look(faded(accent, 0x90), 0.2, 0, 1.9, 0.8));
     put(Role.BIN_HOLDS, new Look(0, 0, faded(accent, 0x90)));
     put(Role.BIN_FAILS, new Look(0, 0, alarm));
+    put(Role.NOTE, new Look(ink, 0.25, 0));
+    put(Role.NOTE_PLATE, new Look(0, 0, paper));
     put(Role.SELECTION, new Look(accent, 0.55, 0));
     put(Role.GRIP, new Look(accent, 0.5, paper));
     put(Role.HOT, new Look(accent, 0.8, 0));
@@ -150,7 +152,7 @@ public final class Palette {
     int stroke = look.stroke() >>> 24 == 0 ? 0 : BLACK;
     int fill =
         switch (role) {
-          case LAYER_BODY, WASHER_BODY, BOLT_BODY -> WHITE_PAPER;
+          case LAYER_BODY, WASHER_BODY, BOLT_BODY, NOTE_PLATE -> WHITE_PAPER;
           case HEAD_GOVERNS, NUT_GOVERNS, BOTH_GOVERN -> 0;
           case PRELOAD_BAND, BIN_HOLDS -> 0xFFD0D0D0;
           default -> look.fill() >>> 24 == 0 ? 0 : look.fill() == paper ? WHITE_PAPER : BLACK;

@@ -6,6 +6,7 @@ import clampwright.joint.Element;
 import clampwright.joint.Fastener;
 import clampwright.joint.Joint;
 import clampwright.joint.Method;
+import clampwright.joint.Note;
 import clampwright.joint.Service;
 import clampwright.joint.Sketch;
 import clampwright.joint.StiffnessMethod;
@@ -51,6 +52,10 @@ final class SketchReader {
         sketch.has("criteria")
             ? sketch.object("criteria", "criteria", "criteria", CriteriaReader::read)
             : Optional.of(Criteria.USUAL);
+    List<Note> remarks =
+        sketch.has("notes")
+            ? NoteReader.read(sketch.array("notes", "notes"), stackSize(json), notes)
+            : List.of();
     return sketch.build(
         () ->
             new Sketch(
@@ -64,7 +69,8 @@ final class SketchReader {
                     tightening.orElseThrow(),
                     service.orElseThrow(),
                     criteria.orElseThrow()),
-                units));
+                units,
+                remarks));
   }
 
   private static Optional<WasherRules> rules(JsonObjectReader rules) {

@@ -8,6 +8,7 @@ import clampwright.joint.Head;
 import clampwright.joint.Joint;
 import clampwright.joint.Material;
 import clampwright.joint.Method;
+import clampwright.joint.Note;
 import clampwright.joint.Outline;
 import clampwright.joint.ScrewThread;
 import clampwright.joint.Sketch;
@@ -46,7 +47,24 @@ final class SketchWriter {
     root.add("temperatures", ServiceWriter.temperatures(joint.service()));
     root.add("loads", ServiceWriter.loads(joint.service()));
     root.add("criteria", CriteriaWriter.json(joint.criteria()));
+    if (!sketch.notes().isEmpty()) {
+      JsonArray notes = new JsonArray();
+      sketch.notes().forEach(note -> notes.add(note(note)));
+      root.add("notes", notes);
+    }
     return encodable(GSON.toJson(root)) + "\n";
+  }
+
+  private static JsonObject note(Note note) {
+    JsonObject json = new JsonObject();
+    json.addProperty("text", note.text());
+    json.addProperty("at", Words.of(Words.NOTED, note.part().kind()));
+    if (note.part().isElement()) {
+      number(json, "layer", note.part().index() + 1);
+    }
+    number(json, "fromAxis", note.fromAxis());
+    number(json, "z", note.z());
+    return json;
   }
 
   private static JsonObject bolt(Fastener fastener) {

@@ -7,6 +7,7 @@ import clampwright.joint.Embedment;
 import clampwright.joint.Head;
 import clampwright.joint.Material;
 import clampwright.joint.Method.ThreadArea;
+import clampwright.joint.Part;
 import clampwright.joint.ScrewThread;
 import clampwright.joint.StiffnessMethod;
 import clampwright.joint.WasherRule;
@@ -73,6 +74,12 @@ final class Words {
   static final Map<String, Embedment.Roughness> ROUGHNESSES = camel(Embedment.Roughness.values());
   static final Map<String, Criteria.Basis> BASES = camel(Criteria.Basis.values());
   static final Map<String, Criteria.Fatigue> FATIGUES = camel(Criteria.Fatigue.values());
+
+  /** What a note can point at. */
+  static final Map<String, Part.Kind> NOTED =
+      paired(
+          List.of("layer", "head", "bolt", "nut"),
+          List.of(Part.Kind.ELEMENT, Part.Kind.HEAD, Part.Kind.SHANK, Part.Kind.ANCHOR));
 
   private Words() {}
 

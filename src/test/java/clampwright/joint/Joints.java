@@ -1,6 +1,7 @@
 package clampwright.joint;
 
 import clampwright.quantity.UnitSystem;
+import java.util.List;
 import java.util.OptionalDouble;
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
@@ -241,6 +242,26 @@ public final class Joints {
 
   /** Any sketch. */
   public static Arbitrary<Sketch> sketches() {
-    return Combinators.combine(text(), any(), Arbitraries.of(UnitSystem.class)).as(Sketch::new);
+    return Combinators.combine(text(), any(), Arbitraries.of(UnitSystem.class), notes())
+        .as(Joints::noted);
+  }
+
+  /** Notes at an element only where the stack has it. */
+  private static Sketch noted(String name, Joint joint, UnitSystem units, List<Note> notes) {
+    return new Sketch(
+        name,
+        joint,
+        units,
+        notes.stream()
+            .filter(
+                note -> !note.part().isElement() || note.part().index() < joint.elements().size())
+            .toList());
+  }
+
+  private static Arbitrary<List<Note>> notes() {
+    Arbitrary<Part> parts =
+        Arbitraries.of(
+            Part.HEAD, Part.SHANK, Part.ANCHOR, Part.element(0), Part.element(1), Part.element(4));
+    return Combinators.combine(text(), parts, finite(), finite()).as(Note::new).list().ofMaxSize(3);
   }
 }

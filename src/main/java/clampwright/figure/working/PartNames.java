@@ -18,6 +18,7 @@ final class PartNames {
       case NUT_CONE -> joint.fastener().isTapped() ? "Lower cone" : "Nut's cone";
       case LOAD -> "Load";
       case PRELOAD -> "Preload";
+      case NOTE -> "Note";
       case ELEMENT -> element(joint, part.index());
     };
   }

@@ -8,7 +8,7 @@ record PartWorking(Found found) {
 
   Working of(Part part) {
     return switch (part.kind()) {
-      case JOINT -> of(Headline.MEMBERS);
+      case JOINT, NOTE -> of(Headline.MEMBERS);
       case SHANK -> of(Headline.BOLT);
       case LOAD -> of(Headline.BOLT_LOAD);
       case PRELOAD -> of(Headline.PRELOAD);

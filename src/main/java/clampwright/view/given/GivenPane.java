@@ -59,7 +59,7 @@ public final class GivenPane extends ScrollPane {
 
   private Optional<Section> section(Part selected) {
     return switch (selected.kind()) {
-      case JOINT -> Optional.empty();
+      case JOINT, NOTE -> Optional.empty();
       case HEAD, SHANK, ANCHOR -> Optional.of(fastener);
       case HEAD_CONE, NUT_CONE -> Optional.of(method);
       case LOAD -> Optional.of(load);

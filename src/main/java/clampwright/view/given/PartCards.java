@@ -7,6 +7,7 @@ import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.joint.Target;
 import clampwright.view.field.FieldRow;
+import clampwright.view.field.NameField;
 import java.util.EnumMap;
 import java.util.Map;
 import java.util.Optional;
@@ -42,6 +43,7 @@ public final class PartCards {
       case HEAD_CONE, NUT_CONE -> cones();
       case LOAD -> load();
       case PRELOAD -> preload();
+      case NOTE -> note();
       case JOINT -> throw new IllegalArgumentException("the joint as a whole has no card");
     };
   }
@@ -105,6 +107,25 @@ public final class PartCards {
             "Angle at the nut", Fields.quantity(model, "card-nut-angle", AngleFields.nut()));
     showWhile(head, AngleFields::isTyped);
     showWhile(nut, AngleFields::isTyped);
+    return section;
+  }
+
+  private Section note() {
+    Section section = new Section("Note");
+    NameField text =
+        new NameField(
+            model,
+            "Change note",
+            sketch ->
+                model.selection().isNote()
+                    ? Optional.of(sketch.notes().get(model.selection().index()).text())
+                    : Optional.empty(),
+            (sketch, words) ->
+                sketch.withNote(model.selection().index(), note -> note.withText(words)));
+    text.setId("card-note");
+    text.getStyleClass().add("wide-field");
+    model.selectionProperty().subscribe((Part was, Part is) -> text.refresh());
+    section.add("Words", text);
     return section;
   }
 

@@ -24,7 +24,7 @@ final class Cursors {
       case FACE, LOAD_AT_HEAD, LOAD_AT_NUT, LOAD_ENTERS, LOAD_LEAVES, PRELOAD_SIZE ->
           Cursor.V_RESIZE;
       case LEFT_EDGE, RIGHT_EDGE, HOLE_EDGE, SHANK_EDGE, FLANK -> Cursor.H_RESIZE;
-      case BODY -> Cursor.OPEN_HAND;
+      case BODY, NOTE -> Cursor.OPEN_HAND;
       case INSERT -> Cursor.HAND;
     };
   }

@@ -54,6 +54,7 @@ final class Hints {
       case LOAD_LEAVES ->
           "Drag to the part where the load leaves; n follows from the parts between.";
       case PRELOAD_SIZE -> "Drag the arrow out or in to change the preload, or type a number.";
+      case NOTE -> "Drag the note where it reads well; double-click to change its words.";
       case INSERT -> "Click to insert a layer here, or drag to draw its thickness.";
     };
   }

@@ -3,6 +3,7 @@ package clampwright.view.section;
 import clampwright.edit.Drag;
 import clampwright.edit.Interfaces;
 import clampwright.edit.Names;
+import clampwright.edit.Noting;
 import clampwright.edit.SketchModel;
 import clampwright.edit.Snap;
 import clampwright.edit.Stacking;
@@ -139,6 +140,10 @@ final class SectionKeys {
   private boolean delete() {
     Optional<Integer> selected = element();
     selected.ifPresent(at -> model.change(Stacking.deleted(model.sketch(), at)));
+    if (model.selection().isNote()) {
+      model.change(Noting.deleted(model.sketch(), model.selection().index()));
+      return true;
+    }
     return selected.isPresent();
   }
 

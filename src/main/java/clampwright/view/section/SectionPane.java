@@ -166,6 +166,12 @@ public final class SectionPane extends Region {
     card.open(at);
   }
 
+  /** Opens the card of the selected part, as for a part just added from a menu. */
+  public void openCardOfSelection() {
+    requestFocus();
+    openCard();
+  }
+
   boolean hasCard() {
     return card.isOpen();
   }

@@ -5,12 +5,14 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertNotEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import clampwright.edit.Noting;
 import clampwright.figure.Mark;
 import clampwright.figure.Role;
 import clampwright.figure.Sheet;
 import clampwright.joint.Element;
 import clampwright.joint.Feature;
 import clampwright.joint.Introduction;
+import clampwright.joint.Note;
 import clampwright.joint.Outline;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
@@ -241,6 +243,22 @@ class GesturesTest {
     Target.Force force = (Target.Force) section.model.sketch().joint().tightening().target();
     assertTrue(force.force() < 25_000, "preload " + force);
     oneStep();
+  }
+
+  @Test
+  void aNoteIsDraggedAboutAndDeletedByKey() {
+    robot.interact(
+        () -> section.model.change(Noting.added(section.model.sketch(), Part.element(COVER))));
+    WaitForAsyncUtils.waitForFxEvents();
+    Note placed = section.model.sketch().notes().get(0);
+    double z = section.middle(COVER) + placed.z();
+    Point2D words = section.at(placed.fromAxis() + 0.6, z - 0.4);
+    robot.drag(words, MouseButton.PRIMARY).moveBy(0, -8).moveBy(30, -32).drop();
+    Note moved = section.model.sketch().notes().get(0);
+    assertTrue(moved.fromAxis() > placed.fromAxis() && moved.z() < placed.z(), moved::toString);
+    assertEquals(Part.note(0), section.model.selection());
+    robot.press(KeyCode.DELETE).release(KeyCode.DELETE);
+    assertTrue(section.model.sketch().notes().isEmpty());
   }
 
   /** The middle of an arrow. */
