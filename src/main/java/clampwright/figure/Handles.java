@@ -22,6 +22,9 @@ final class Handles {
     if (options.selected().isElement() && options.selected().index() < count) {
       selection(options.selected().index());
     }
+    if (options.selected().isNote()) {
+      note(options.selected());
+    }
     for (int i = 0; count > 0 && i <= count; i++) {
       insertGrip(i);
     }
@@ -48,6 +51,16 @@ final class Handles {
     return mark.tag().part().equals(hot.part())
         && hot.feature().isPresent()
         && mark.tag().feature().equals(hot.feature());
+  }
+
+  private void note(Part note) {
+    List<Mark> plates =
+        drawing.marks().stream()
+            .filter(mark -> mark.role() == Role.NOTE_PLATE && mark.tag().part().equals(note))
+            .toList();
+    for (Mark plate : plates) {
+      drawing.outline(Tag.of(Role.SELECTION, note), ((Mark.Area) plate).points());
+    }
   }
 
   private void selection(int i) {

@@ -4,6 +4,7 @@ import clampwright.joint.Feature;
 import clampwright.joint.Note;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
+import java.util.List;
 
 /** The reader's own notes, each with a leader to the nearest place of its part. */
 final class NoteDrawing {
@@ -53,10 +54,10 @@ final class NoteDrawing {
             : from;
     drawing.line(Tag.of(Role.NOTE, part), start, target);
     drawing.disc(Tag.of(Role.NOTE, part), target, 0.6, true);
-    drawing.area(
-        Tag.of(Role.NOTE_PLATE, part, Feature.NOTE),
-        java.util.List.of(
-            left, new Point(right.x(), left.y()), right, new Point(left.x(), right.y())));
+    List<Point> plate =
+        List.of(left, new Point(right.x(), left.y()), right, new Point(left.x(), right.y()));
+    drawing.area(Tag.of(Role.NOTE_PLATE, part, Feature.NOTE), plate);
+    drawing.outline(Tag.of(Role.NOTE, part), plate);
     drawing.text(Tag.of(Role.NOTE, part), x, y, note.text(), Mark.Anchor.START, SIZE);
   }
 
