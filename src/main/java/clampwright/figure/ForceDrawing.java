@@ -45,7 +45,7 @@ final class ForceDrawing {
 
   /** Words keep clear of the bolt's ends and of the arrows. */
   private void reserve() {
-    double rim = layout.joint().fastener().head().rim() / 2;
+    double rim = 0.58 * layout.joint().fastener().head().rim();
     drawing.reserve(drawing.at(-rim, layout.top()), drawing.at(rim, 0));
     drawing.reserve(
         drawing.at(-layout.nutReach(), layout.stack()),
