@@ -43,7 +43,7 @@ final class Documents {
     this.desk = desk;
   }
 
-  /** The file of the sketch; empty when it has none yet. */
+  /** The file of the sketch; empty when it has none yet, also when it came out of a picture. */
   Optional<Path> file() {
     return file;
   }
@@ -75,8 +75,14 @@ final class Documents {
 
   private void read(Path path) {
     String failure = path.getFileName() + " cannot be opened";
-    if (take(SketchFile.read(path), failure, Optional.of(path))) {
+    Stored stored = SketchFile.read(path);
+    // Saving must not put a sketch in the place of the picture that it came from.
+    boolean inPicture = stored instanceof Stored.Opened opened && opened.inPicture();
+    if (take(stored, failure, inPicture ? Optional.empty() : Optional.of(path))) {
       settings.addRecent(path);
+      if (inPicture) {
+        desk.report("Opened from the picture " + path.getFileName() + "; saving asks for a file.");
+      }
     }
   }
 

@@ -4,6 +4,7 @@ import clampwright.figure.PictureFigure;
 import clampwright.figure.Preset;
 import clampwright.figure.Show;
 import clampwright.joint.Sketch;
+import clampwright.store.PictureFormat;
 import clampwright.store.SketchFile;
 import clampwright.store.Stored;
 import java.io.IOException;
@@ -74,6 +75,11 @@ final class FigureCommand implements Callable<Integer> {
   @Option(names = "--dpi", paramLabel = "DPI", description = "resolution of a PNG, 300 unless said")
   private double dpi = 300;
 
+  @Option(
+      names = "--without-sketch",
+      description = "leave the sketch out, which else lies inside, so that the picture opens again")
+  private boolean withoutSketch;
+
   @Option(names = "--caption", paramLabel = "TEXT", description = "a sentence below the picture")
   private String caption = "";
 
@@ -116,7 +122,7 @@ final class FigureCommand implements Callable<Integer> {
         name.endsWith(SketchFile.EXTENSION)
             ? name.substring(0, name.length() - SketchFile.EXTENSION.length())
             : name;
-    return bare + "." + picture.kind().ending();
+    return bare + picture.format().ending();
   }
 
   /** What was asked; empty when a word is not known, which is said then. */
@@ -124,8 +130,8 @@ final class FigureCommand implements Callable<Integer> {
     boolean folder = files.size() > 1 || Files.isDirectory(output);
     String name = output.getFileName() == null ? "" : output.getFileName().toString();
     String ending = folder ? kind : name.substring(name.lastIndexOf('.') + 1);
-    Optional<Picture.Kind> of =
-        find(Stream.of(Picture.Kind.values()), Picture.Kind::ending, ending);
+    Optional<PictureFormat> of =
+        find(Stream.of(PictureFormat.values()), format -> format.ending().substring(1), ending);
     Optional<Preset> size = find(Stream.of(Preset.values()), Preset::word, preset);
     Optional<Picture.Theme> look =
         find(Stream.of(Picture.Theme.values()), Picture.Theme::word, theme);
@@ -144,7 +150,7 @@ final class FigureCommand implements Callable<Integer> {
       return Optional.empty();
     }
     PictureFigure.Request request = new PictureFigure.Request(size.get(), shown, caption, 0);
-    return Optional.of(new Picture(of.get(), look.get(), dpi, request));
+    return Optional.of(new Picture(of.get(), look.get(), dpi, !withoutSketch, request));
   }
 
   private <T> Optional<T> find(

@@ -6,7 +6,9 @@ import java.util.Optional;
 /** Asks the user for a file. The window asks through the system's dialog. */
 interface FilePrompt {
 
-  /** A file to open; empty when the user would rather not. */
+  /**
+   * A file to open, a sketch or a picture with one inside; empty when the user would rather not.
+   */
   Optional<Path> toOpen();
 
   /**

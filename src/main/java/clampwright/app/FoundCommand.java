@@ -36,7 +36,10 @@ final class FoundCommand implements Callable<Integer> {
   private final PrintStream out;
   private final PrintStream err;
 
-  @Parameters(index = "0", paramLabel = "FILE", description = "a *.joint.json sketch")
+  @Parameters(
+      index = "0",
+      paramLabel = "FILE",
+      description = "a *.joint.json sketch, or a picture with one inside")
   private Path file;
 
   @Option(names = "--json", description = "for programs: JSON in mm, mm², N, N/mm, degrees; UTF-8")

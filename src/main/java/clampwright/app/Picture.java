@@ -9,29 +9,26 @@ import clampwright.paint.Palette;
 import clampwright.paint.print.PdfPicture;
 import clampwright.paint.print.PngPicture;
 import clampwright.paint.print.SvgPicture;
+import clampwright.store.PictureFormat;
+import clampwright.store.SketchPicture;
 import java.nio.charset.StandardCharsets;
 import javafx.scene.image.Image;
 
 /**
  * A picture that leaves the program.
  *
- * @param kind of file
+ * @param format of the file
  * @param theme colours
  * @param dpi resolution of a PNG [dots per inch]
+ * @param carriesSketch whether opening the picture brings the sketch back
  * @param request size and content
  */
-record Picture(Kind kind, Theme theme, double dpi, PictureFigure.Request request) {
-
-  /** Kinds of files. */
-  enum Kind {
-    PNG,
-    SVG,
-    PDF;
-
-    String ending() {
-      return name().toLowerCase(java.util.Locale.ROOT);
-    }
-  }
+record Picture(
+    PictureFormat format,
+    Theme theme,
+    double dpi,
+    boolean carriesSketch,
+    PictureFigure.Request request) {
 
   /** Colours of a picture. */
   enum Theme {
@@ -81,9 +78,14 @@ record Picture(Kind kind, Theme theme, double dpi, PictureFigure.Request request
 
   /** The file. */
   byte[] bytes(Sketch sketch) {
+    byte[] painted = painted(sketch);
+    return carriesSketch ? SketchPicture.with(format, painted, sketch) : painted;
+  }
+
+  private byte[] painted(Sketch sketch) {
     Figure figure = figure(sketch);
     Palette palette = palette();
-    return switch (kind) {
+    return switch (format) {
       case PNG -> PngPicture.of(figure, palette, dpi);
       case SVG ->
           SvgPicture.of(

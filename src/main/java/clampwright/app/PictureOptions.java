@@ -3,6 +3,7 @@ package clampwright.app;
 import clampwright.figure.PictureFigure;
 import clampwright.figure.Preset;
 import clampwright.figure.Show;
+import clampwright.store.PictureFormat;
 import java.util.EnumMap;
 import java.util.EnumSet;
 import java.util.Map;
@@ -11,6 +12,7 @@ import java.util.stream.Stream;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
+import javafx.scene.control.Separator;
 import javafx.scene.control.TextField;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
@@ -22,9 +24,10 @@ final class PictureOptions extends VBox {
 
   private final ComboBox<Preset> preset = box(Preset.values());
   private final ComboBox<Picture.Theme> theme = box(Picture.Theme.values());
-  private final ComboBox<Picture.Kind> kind = box(Picture.Kind.values());
+  private final ComboBox<PictureFormat> kind = box(PictureFormat.values());
   private final ComboBox<Integer> dpi = new ComboBox<>();
   private final TextField caption = new TextField();
+  private final CheckBox carries = new CheckBox("opens again as this sketch");
   private final Map<Show, CheckBox> shows = new EnumMap<>(Show.class);
 
   /**
@@ -38,8 +41,8 @@ final class PictureOptions extends VBox {
     preset.setValue(Preset.PAGE);
     theme.setConverter(named(Picture.Theme::title));
     theme.setValue(Picture.Theme.LIGHT);
-    kind.setConverter(named(Picture.Kind::name));
-    kind.setValue(Picture.Kind.PNG);
+    kind.setConverter(named(PictureFormat::name));
+    kind.setValue(PictureFormat.PNG);
     dpi.getItems().setAll(96, 150, 200, 300, 600);
     dpi.setConverter(named(value -> value + " dpi"));
     dpi.setValue(300);
@@ -58,6 +61,8 @@ final class PictureOptions extends VBox {
     grid.addRow(3, new Label("Resolution"), dpi);
     grid.addRow(4, new Label("Caption"), caption);
     getChildren().add(grid);
+    carries.setId("picture-carries");
+    carries.setSelected(true);
     for (Show show : Show.values()) {
       CheckBox check = new CheckBox(show.title());
       check.setId("picture-show-" + show.word());
@@ -66,6 +71,8 @@ final class PictureOptions extends VBox {
       shows.put(show, check);
       getChildren().add(check);
     }
+    Separator line = new Separator();
+    getChildren().addAll(line, carries);
     Stream.of(preset, theme, kind, dpi)
         .forEach(
             box -> {
@@ -96,7 +103,7 @@ final class PictureOptions extends VBox {
   }
 
   private void follow(Runnable changed) {
-    dpi.setDisable(kind.getValue() != Picture.Kind.PNG);
+    dpi.setDisable(kind.getValue() != PictureFormat.PNG);
     changed.run();
   }
 
@@ -111,7 +118,8 @@ final class PictureOptions extends VBox {
         });
     PictureFigure.Request request =
         new PictureFigure.Request(preset.getValue(), shown, caption.getText(), loadCase);
-    double resolution = kind.getValue() == Picture.Kind.PNG ? dpi.getValue() : SCREEN;
-    return new Picture(kind.getValue(), theme.getValue(), resolution, request);
+    double resolution = kind.getValue() == PictureFormat.PNG ? dpi.getValue() : SCREEN;
+    return new Picture(
+        kind.getValue(), theme.getValue(), resolution, carries.isSelected(), request);
   }
 }

@@ -126,8 +126,7 @@ final class PictureWindow {
     Picture picture = picture();
     String name =
         model.sketch().name().replaceAll("[^\\p{L}\\p{N} ._-]+", "").strip()
-            + "."
-            + picture.kind().ending();
+            + picture.format().ending();
     prompt.toExport("Export figure", name).ifPresent(path -> write(picture, path));
   }
 

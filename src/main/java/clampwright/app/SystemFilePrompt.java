@@ -1,18 +1,25 @@
 package clampwright.app;
 
+import clampwright.store.PictureFormat;
 import clampwright.store.SketchFile;
 import java.io.File;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Supplier;
+import java.util.stream.Stream;
 import javafx.stage.FileChooser;
 import javafx.stage.FileChooser.ExtensionFilter;
 import javafx.stage.Window;
 
 /** Asks for files by the system's dialog, starting where the last file lay. */
 final class SystemFilePrompt implements FilePrompt {
+  private static final ExtensionFilter SKETCHES =
+      new ExtensionFilter("Joint sketches", "*" + SketchFile.EXTENSION, "*.json");
+  private static final ExtensionFilter ALL = new ExtensionFilter("All files", "*");
+
   private final Window owner;
   private final Supplier<Optional<Path>> last;
 
@@ -23,8 +30,23 @@ final class SystemFilePrompt implements FilePrompt {
 
   @Override
   public Optional<Path> toOpen() {
-    File chosen = chooser("Open a sketch").showOpenDialog(owner);
+    FileChooser chooser = chooser("Open a sketch");
+    chooser.getExtensionFilters().setAll(toOpenOffered());
+    File chosen = chooser.showOpenDialog(owner);
     return Optional.ofNullable(chosen).map(File::toPath);
+  }
+
+  /** The kinds of files to choose from at opening, the usual one first. */
+  static List<ExtensionFilter> toOpenOffered() {
+    List<String> pictures =
+        Stream.of(PictureFormat.values()).map(format -> "*" + format.ending()).toList();
+    List<String> both =
+        Stream.concat(SKETCHES.getExtensions().stream(), pictures.stream()).toList();
+    return List.of(
+        new ExtensionFilter("Sketches and pictures with one", both),
+        SKETCHES,
+        new ExtensionFilter("Pictures with a sketch", pictures),
+        ALL);
   }
 
   @Override
@@ -62,11 +84,7 @@ final class SystemFilePrompt implements FilePrompt {
   private FileChooser chooser(String title) {
     FileChooser chooser = new FileChooser();
     chooser.setTitle(title);
-    chooser
-        .getExtensionFilters()
-        .setAll(
-            new ExtensionFilter("Joint sketches", "*" + SketchFile.EXTENSION, "*.json"),
-            new ExtensionFilter("All files", "*"));
+    chooser.getExtensionFilters().setAll(SKETCHES, ALL);
     last.get()
         .map(Path::toAbsolutePath)
         .map(Path::getParent)

@@ -57,7 +57,7 @@ final class JsonTree {
         problem = "it is nested too deeply";
       }
     }
-    notes.problem("This is not a sketch file: " + problem + ", near " + place() + ".");
+    notes.problem(SketchJson.NO_SKETCH + problem + ", near " + place() + ".");
     return Optional.empty();
   }
 

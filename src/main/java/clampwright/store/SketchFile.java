@@ -1,8 +1,10 @@
 package clampwright.store;
 
 import clampwright.joint.Sketch;
+import java.io.ByteArrayInputStream;
 import java.io.IOException;
 import java.io.InputStream;
+import java.io.SequenceInputStream;
 import java.nio.ByteBuffer;
 import java.nio.channels.FileChannel;
 import java.nio.charset.CharacterCodingException;
@@ -18,9 +20,15 @@ public final class SketchFile {
   /** [bytes]; a thousand layers come to a tenth of it. */
   static final int LARGEST = 4_000_000;
 
+  /** [bytes]; a large sheet at the resolution of a printer comes to a tenth of it. */
+  static final int LARGEST_PICTURE = 100_000_000;
+
   private SketchFile() {}
 
-  /** Reads a sketch; whatever the path leads to, the answer is a sketch or the problems. */
+  /**
+   * Reads a sketch, also out of a picture with one inside; whatever the path leads to, the answer
+   * is a sketch or the problems.
+   */
   public static Stored read(Path path) {
     if (Files.isDirectory(path)) {
       return refused("This is a folder, not a sketch file.");
@@ -31,12 +39,23 @@ public final class SketchFile {
     }
     try (InputStream in = Files.newInputStream(path)) {
       byte[] bytes = in.readNBytes(LARGEST + 1);
+      if (PictureFormat.of(bytes).isPresent()) {
+        return picture(bytes, in);
+      }
       return bytes.length > LARGEST
           ? refused("This file is too large to be a sketch (over 4 MB).")
           : SketchJson.read(text(bytes));
     } catch (IOException trouble) {
       return refused(FileTrouble.reading(trouble));
     }
+  }
+
+  private static Stored picture(byte[] start, InputStream rest) throws IOException {
+    InputStream whole = new SequenceInputStream(new ByteArrayInputStream(start), rest);
+    byte[] bytes = whole.readNBytes(LARGEST_PICTURE + 1);
+    return bytes.length > LARGEST_PICTURE
+        ? refused("This picture is too large to be opened (over 100 MB).")
+        : SketchPicture.read(bytes);
   }
 
   private static String text(byte[] bytes) throws CharacterCodingException {

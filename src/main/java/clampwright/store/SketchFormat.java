@@ -23,7 +23,7 @@ final class SketchFormat {
   static boolean isRead(JsonObject root, Notes notes) {
     JsonElement number = root.get(KEY);
     if (!(number instanceof JsonPrimitive primitive && primitive.isNumber())) {
-      notes.problem("This is not a sketch file: it has no format number.");
+      notes.problem(SketchJson.NO_SKETCH + "it has no format number.");
       return false;
     }
     double format = Double.parseDouble(number.getAsString());
@@ -38,7 +38,7 @@ final class SketchFormat {
       return false;
     }
     if (format < 1 || format != Math.rint(format)) {
-      notes.problem("This is not a sketch file: there is no format " + shown + ".");
+      notes.problem(SketchJson.NO_SKETCH + "there is no format " + shown + ".");
       return false;
     }
     if (format == 1) {

@@ -11,6 +11,9 @@ import java.util.Optional;
  * of every number.
  */
 public final class SketchJson {
+  /** Begins every problem of a text that is no sketch at all; the rest says why. */
+  static final String NO_SKETCH = "This is not a sketch file: ";
+
   private SketchJson() {}
 
   /** The text that stands for a sketch. */
@@ -38,7 +41,7 @@ public final class SketchJson {
     if (tree instanceof JsonObject object) {
       return Optional.of(object);
     }
-    notes.problem("This is not a sketch file: it does not begin with a brace.");
+    notes.problem(NO_SKETCH + "it does not begin with a brace.");
     return Optional.empty();
   }
 }

@@ -11,10 +11,16 @@ public sealed interface Stored {
    *
    * @param sketch as stored
    * @param remarks what was not understood and ignored, each a line with its place; usually empty
+   * @param inPicture whether it came out of a picture, which is no file to save a sketch to
    */
-  record Opened(Sketch sketch, List<String> remarks) implements Stored {
+  record Opened(Sketch sketch, List<String> remarks, boolean inPicture) implements Stored {
     public Opened {
       remarks = List.copyOf(remarks);
+    }
+
+    /** A sketch from a text of its own. */
+    public Opened(Sketch sketch, List<String> remarks) {
+      this(sketch, remarks, false);
     }
   }
 

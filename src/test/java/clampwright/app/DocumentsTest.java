@@ -1,5 +1,6 @@
 package clampwright.app;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
@@ -7,11 +8,14 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import clampwright.edit.SketchModel;
 import clampwright.joint.Sketch;
 import clampwright.joint.Tightening;
+import clampwright.store.PictureFormat;
 import clampwright.store.Samples;
 import clampwright.store.SketchFile;
+import clampwright.store.SketchPicture;
 import clampwright.store.Stored;
 import clampwright.view.Sketches;
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -172,6 +176,48 @@ class DocumentsTest implements Documents.Desk {
 
     assertEquals(List.of(), answers.suggested);
     assertEquals(edited, ((Stored.Opened) SketchFile.read(other)).sketch());
+  }
+
+  @Test
+  void aSketchOutOfAPictureHasNoFileOfItsOwn() throws IOException {
+    Path picture = folder.resolve("other.svg");
+    Sketch shown = Sketches.cover().withName("Shown");
+    byte[] svg = "<svg xmlns='http://www.w3.org/2000/svg'/>".getBytes(StandardCharsets.UTF_8);
+    Files.write(picture, SketchPicture.with(PictureFormat.SVG, svg, shown));
+    byte[] before = Files.readAllBytes(picture);
+    documents.open(other);
+
+    documents.open(picture);
+
+    assertEquals(shown, model.sketch());
+    assertEquals(Optional.empty(), documents.file());
+    assertFalse(model.unsavedProperty().get());
+    assertEquals(picture, settings.recent().get(0));
+    assertEquals(
+        "Opened from the picture other.svg; saving asks for a file.", calls.get(calls.size() - 1));
+
+    Path kept = folder.resolve("kept.joint.json");
+    answers.save = Optional.of(kept);
+    assertTrue(documents.save());
+    assertEquals(List.of("shown.joint.json"), answers.suggested);
+    assertEquals(Optional.of(kept), documents.file());
+    assertArrayEquals(before, Files.readAllBytes(picture));
+  }
+
+  @Test
+  void aPictureWithoutASketchLeavesTheSketchAsItIs() throws IOException {
+    documents.open(other);
+    Sketch before = model.sketch();
+    Path picture = folder.resolve("foreign.svg");
+    Files.writeString(picture, "<svg xmlns='http://www.w3.org/2000/svg'/>");
+
+    documents.open(picture);
+
+    assertEquals(
+        List.of("foreign.svg cannot be opened: This picture holds no sketch."), answers.told);
+    assertEquals(before, model.sketch());
+    assertEquals(Optional.of(other), documents.file());
+    assertEquals(List.of(other), settings.recent());
   }
 
   @Test

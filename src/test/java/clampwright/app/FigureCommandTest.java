@@ -3,6 +3,9 @@ package clampwright.app;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import clampwright.joint.Sketch;
+import clampwright.store.SketchFile;
+import clampwright.store.Stored;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -13,6 +16,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 /** Pictures without a display. */
 class FigureCommandTest {
@@ -35,6 +39,20 @@ class FigureCommandTest {
       found.append(String.format("%02x ", bytes[i]));
     }
     assertEquals(begins, found.toString().strip());
+  }
+
+  /** Every kind of picture opens again as the sketch it shows, unless that was left out. */
+  @ParameterizedTest
+  @ValueSource(strings = {"png", "svg", "pdf"})
+  void thePictureIsTheFile(String kind) throws IOException {
+    Path picture = folder.resolve("a." + kind);
+    assertEquals(0, Run.of("figure", LID, "-o", picture.toString(), "--dpi", "60").exit());
+    Sketch sketch = ((Stored.Opened) SketchFile.read(Path.of(LID))).sketch();
+    assertEquals(sketch, ((Stored.Opened) SketchFile.read(picture)).sketch());
+    Run.of("figure", LID, "-o", picture.toString(), "--dpi", "60", "--without-sketch");
+    assertEquals(
+        List.of("This picture holds no sketch."),
+        ((Stored.Refused) SketchFile.read(picture)).problems());
   }
 
   @ParameterizedTest

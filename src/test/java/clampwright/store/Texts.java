@@ -58,4 +58,14 @@ final class Texts {
     }
     throw new AssertionError("opened: " + text);
   }
+
+  /** A picture that carries a text, which may be no sketch. */
+  static byte[] carried(PictureFormat format, String text) {
+    byte[] picture = Pictures.of(format);
+    return switch (format) {
+      case PNG -> TextInPng.with(picture, text);
+      case SVG -> TextInSvg.with(picture, text);
+      case PDF -> TextInPdf.with(picture, text);
+    };
+  }
 }
