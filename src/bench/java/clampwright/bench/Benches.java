@@ -15,12 +15,13 @@ public final class Benches {
       case "frame" -> FrameBench.run();
       case "startup" -> StartupBench.run();
       case "spread" -> SpreadBench.run();
+      case "picture" -> PictureBench.run();
       default ->
           throw new IllegalArgumentException(
               "no benchmark is called '"
                   + name
                   + "'; there are: assessment, frame, startup,"
-                  + " spread");
+                  + " spread, picture");
     }
   }
 }

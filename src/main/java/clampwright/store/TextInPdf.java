@@ -86,10 +86,19 @@ final class TextInPdf {
         found = Optional.of(new Carried(text(picture, document, sum), sum.group(1)));
       }
     }
-    if (found.isEmpty() && !document.stripTrailing().endsWith(END)) {
-      throw PictureTrouble.broken(picture, SUM_KEY, "the picture ends too early");
+    if (found.isEmpty()) {
+      checkNone(picture, document);
     }
     return found;
+  }
+
+  private static void checkNone(byte[] picture, String document) throws PictureTrouble {
+    if (!document.stripTrailing().endsWith(END)) {
+      throw PictureTrouble.broken(picture, FILE, "the picture ends too early");
+    }
+    if (document.contains(FILE)) {
+      throw PictureTrouble.damaged("its check sum is missing");
+    }
   }
 
   private static String text(byte[] picture, String document, Matcher sum) throws PictureTrouble {

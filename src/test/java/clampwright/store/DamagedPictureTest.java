@@ -163,6 +163,24 @@ class DamagedPictureTest {
     return place;
   }
 
+  @Test
+  void aDamagedPdfIsFoundOut() {
+    byte[] pdf = with(PictureFormat.PDF);
+    String damaged = "The sketch inside this picture is damaged: ";
+    byte[] key = pdf.clone();
+    key[at(pdf, "XXClampwright")] ^= 1;
+    checkRefused(damaged + "its check sum is missing.", key);
+    byte[] filter = pdf.clone();
+    filter[at(pdf, "FlateDecode/") + 1] ^= 1;
+    checkRefused(damaged + "it is packed in a way that is not known.", filter);
+    int stream = at(pdf, "stream\n");
+    checkRefused(damaged + "the picture ends too early.", Arrays.copyOf(pdf, stream));
+    checkRefused(damaged + "its text cannot be unpacked.", Arrays.copyOf(pdf, stream + 40));
+    checkRefused(
+        "This picture is damaged: the picture ends too early; no sketch was found in it.",
+        Arrays.copyOf(pdf, 12));
+  }
+
   /** Neither the entities of other programs nor bombs made of them are looked into. */
   @Test
   void entitiesAreNotLookedInto() {
