@@ -4,6 +4,7 @@ import clampwright.figure.PictureFigure;
 import clampwright.figure.Preset;
 import clampwright.figure.Show;
 import clampwright.joint.Sketch;
+import clampwright.quantity.UnitSystem;
 import clampwright.store.PictureFormat;
 import clampwright.store.SketchFile;
 import clampwright.store.Stored;
@@ -80,6 +81,12 @@ final class FigureCommand implements Callable<Integer> {
       description = "leave the sketch out, which else lies inside, so that the picture opens again")
   private boolean withoutSketch;
 
+  @Option(
+      names = "--units",
+      paramLabel = "UNITS",
+      description = "mm-N or in-lbf; those of the sketch unless said")
+  private String units = "";
+
   @Option(names = "--caption", paramLabel = "TEXT", description = "a sentence below the picture")
   private String caption = "";
 
@@ -136,7 +143,11 @@ final class FigureCommand implements Callable<Integer> {
     Optional<Picture.Theme> look =
         find(Stream.of(Picture.Theme.values()), Picture.Theme::word, theme);
     Set<Show> shown = show.isEmpty() ? Show.USUAL : EnumSet.noneOf(Show.class);
-    boolean known = true;
+    Optional<UnitSystem> system =
+        units.isEmpty()
+            ? Optional.empty()
+            : find(Stream.of(UnitSystem.values()), FigureCommand::word, units);
+    boolean known = units.isEmpty() || system.isPresent();
     for (String word : show) {
       Optional<Show> found = find(Stream.of(Show.values()), Show::word, word);
       found.ifPresent(shown::add);
@@ -150,7 +161,11 @@ final class FigureCommand implements Callable<Integer> {
       return Optional.empty();
     }
     PictureFigure.Request request = new PictureFigure.Request(size.get(), shown, caption, 0);
-    return Optional.of(new Picture(of.get(), look.get(), dpi, !withoutSketch, request));
+    return Optional.of(new Picture(of.get(), look.get(), dpi, !withoutSketch, system, request));
+  }
+
+  private static String word(UnitSystem system) {
+    return system == UnitSystem.METRIC ? "mm-N" : "in-lbf";
   }
 
   private <T> Optional<T> find(

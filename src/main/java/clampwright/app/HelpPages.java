@@ -82,7 +82,7 @@ final class HelpPages {
             "Table values carry their source and how sure it is; rest the pointer on a field to"
                 + " see it. Some are from memory and say so."),
         paragraph(
-            "Built with OpenJFX, AtlantaFX, Gson, Apache Commons CSV, Statistics and RNG, picocli and the Liberation"
+            "Built with OpenJFX, AtlantaFX, Gson, Apache Commons CSV, Statistics and RNG, OpenPDF, picocli and the Liberation"
                 + " fonts, under their licences."));
   }
 

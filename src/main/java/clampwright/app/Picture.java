@@ -9,9 +9,11 @@ import clampwright.paint.Palette;
 import clampwright.paint.print.PdfPicture;
 import clampwright.paint.print.PngPicture;
 import clampwright.paint.print.SvgPicture;
+import clampwright.quantity.UnitSystem;
 import clampwright.store.PictureFormat;
 import clampwright.store.SketchPicture;
 import java.nio.charset.StandardCharsets;
+import java.util.Optional;
 import javafx.scene.image.Image;
 
 /**
@@ -21,6 +23,7 @@ import javafx.scene.image.Image;
  * @param theme colours
  * @param dpi resolution of a PNG [dots per inch]
  * @param carriesSketch whether opening the picture brings the sketch back
+ * @param units of its numbers; empty for those of the sketch
  * @param request size and content
  */
 record Picture(
@@ -28,6 +31,7 @@ record Picture(
     Theme theme,
     double dpi,
     boolean carriesSketch,
+    Optional<UnitSystem> units,
     PictureFigure.Request request) {
 
   /** Colours of a picture. */
@@ -62,7 +66,8 @@ record Picture(
   }
 
   Figure figure(Sketch sketch) {
-    return PictureFigure.of(sketch, Assessment.of(sketch.joint()), request);
+    Sketch shown = sketch.withUnits(units.orElse(sketch.units()));
+    return PictureFigure.of(shown, Assessment.of(sketch.joint()), request);
   }
 
   /** Colours, and lines as wide as the preset's type is large. */

@@ -3,10 +3,13 @@ package clampwright.app;
 import clampwright.figure.PictureFigure;
 import clampwright.figure.Preset;
 import clampwright.figure.Show;
+import clampwright.quantity.UnitSystem;
 import clampwright.store.PictureFormat;
 import java.util.EnumMap;
 import java.util.EnumSet;
+import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Stream;
 import javafx.scene.control.CheckBox;
@@ -26,6 +29,7 @@ final class PictureOptions extends VBox {
   private final ComboBox<Picture.Theme> theme = box(Picture.Theme.values());
   private final ComboBox<PictureFormat> kind = box(PictureFormat.values());
   private final ComboBox<Integer> dpi = new ComboBox<>();
+  private final ComboBox<Optional<UnitSystem>> units = new ComboBox<>();
   private final TextField caption = new TextField();
   private final CheckBox carries = new CheckBox("opens again as this sketch");
   private final Map<Show, CheckBox> shows = new EnumMap<>(Show.class);
@@ -46,6 +50,14 @@ final class PictureOptions extends VBox {
     dpi.getItems().setAll(96, 150, 200, 300, 600);
     dpi.setConverter(named(value -> value + " dpi"));
     dpi.setValue(300);
+    units
+        .getItems()
+        .setAll(
+            List.of(
+                Optional.empty(), Optional.of(UnitSystem.METRIC), Optional.of(UnitSystem.INCH)));
+    units.setConverter(named(PictureOptions::words));
+    units.setValue(Optional.empty());
+    units.setId("picture-units");
     preset.setId("picture-preset");
     theme.setId("picture-theme");
     kind.setId("picture-kind");
@@ -57,9 +69,10 @@ final class PictureOptions extends VBox {
     grid.setVgap(8);
     grid.addRow(0, new Label("For"), preset);
     grid.addRow(1, new Label("Colours"), theme);
-    grid.addRow(2, new Label("File"), kind);
-    grid.addRow(3, new Label("Resolution"), dpi);
-    grid.addRow(4, new Label("Caption"), caption);
+    grid.addRow(2, new Label("Units"), units);
+    grid.addRow(3, new Label("File"), kind);
+    grid.addRow(4, new Label("Resolution"), dpi);
+    grid.addRow(5, new Label("Caption"), caption);
     getChildren().add(grid);
     carries.setId("picture-carries");
     carries.setSelected(true);
@@ -73,13 +86,20 @@ final class PictureOptions extends VBox {
     }
     Separator line = new Separator();
     getChildren().addAll(line, carries);
-    Stream.of(preset, theme, kind, dpi)
+    Stream.of(preset, theme, units, kind, dpi)
         .forEach(
             box -> {
               box.setMaxWidth(Double.MAX_VALUE);
               box.valueProperty().addListener(observable -> follow(changed));
             });
     caption.textProperty().addListener(observable -> changed.run());
+  }
+
+  private static String words(Optional<UnitSystem> units) {
+    if (units.isEmpty()) {
+      return "as on the screen";
+    }
+    return units.get() == UnitSystem.METRIC ? "mm · N" : "in · lbf";
   }
 
   private static <T> ComboBox<T> box(T[] values) {
@@ -120,6 +140,11 @@ final class PictureOptions extends VBox {
         new PictureFigure.Request(preset.getValue(), shown, caption.getText(), loadCase);
     double resolution = kind.getValue() == PictureFormat.PNG ? dpi.getValue() : SCREEN;
     return new Picture(
-        kind.getValue(), theme.getValue(), resolution, carries.isSelected(), request);
+        kind.getValue(),
+        theme.getValue(),
+        resolution,
+        carries.isSelected(),
+        units.getValue(),
+        request);
   }
 }

@@ -63,6 +63,7 @@ class FigureCommandTest {
         "--theme | sepia | 'sepia' is not known here; there are: light, dark, bw",
         "--show | cones,bolts | 'bolts' is not known here; there are: cones, cylinders, governing,"
             + " dimensions, names, forces, readouts, ladder, diagram",
+        "--units | furlongs | 'furlongs' is not known here; there are: mm-N, in-lbf",
         "--dpi | 1 | --dpi must lie between 10 and 2400",
       })
   void aWrongOptionNamesTheRightOnes(String option, String value, String said) {
@@ -77,6 +78,17 @@ class FigureCommandTest {
     Run run = Run.of("figure", LID, "-o", in("a.gif"));
     assertEquals(2, run.exit());
     assertEquals("'gif' is not known here; there are: png, svg, pdf", run.err().strip());
+  }
+
+  /** 10 mm are 0.394 in; the sketch inside keeps its own units. */
+  @Test
+  void aPictureCanBeInOtherUnits() throws IOException {
+    Path picture = folder.resolve("a.svg");
+    assertEquals(0, Run.of("figure", LID, "-o", picture.toString(), "--units", "in-lbf").exit());
+    assertTrue(Files.readString(picture).contains(">0.394<"));
+    assertEquals(
+        SketchFile.read(Path.of(LID)) instanceof Stored.Opened lid ? lid.sketch() : null,
+        ((Stored.Opened) SketchFile.read(picture)).sketch());
   }
 
   @Test
