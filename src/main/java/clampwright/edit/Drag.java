@@ -34,7 +34,10 @@ public sealed interface Drag
       case BODY -> part.isElement() ? Optional.of(OrderDrag.of(sketch, part, grab)) : none();
       case FLANK -> FlankDrag.of(sketch, part, grab);
       case SHANK_EDGE -> ShankDrag.of(sketch, grab);
-      case NOTE -> Optional.of(new NoteDrag(sketch, grab, part.index()));
+      case NOTE ->
+          part.isNote() && part.index() < sketch.notes().size()
+              ? Optional.of(new NoteDrag(sketch, grab, part.index()))
+              : none();
       case PRELOAD_SIZE -> ForceDrag.preload(sketch, grab);
       case LOAD_AT_HEAD, LOAD_AT_NUT, LOAD_ENTERS, LOAD_LEAVES ->
           load(sketch, 0, feature, fromAxis, z);

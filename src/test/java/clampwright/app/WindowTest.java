@@ -5,10 +5,12 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import clampwright.edit.SketchModel;
+import clampwright.figure.Sentences;
 import clampwright.joint.Joint;
 import clampwright.joint.Part;
 import clampwright.joint.Sketch;
 import clampwright.joint.Target;
+import clampwright.mechanics.checks.Verdict;
 import clampwright.quantity.UnitSystem;
 import clampwright.store.SketchFile;
 import clampwright.store.Stored;
@@ -403,6 +405,24 @@ class WindowTest {
         () -> ((javafx.scene.control.Button) robot.lookup("#check-parting").query()).fire());
     WaitForAsyncUtils.waitForFxEvents();
     assertEquals("Check: parting", title());
+  }
+
+  /** Of all checks of this sketch thread stripping leaves the least. */
+  @Test
+  void theLeastMarginStandsUnderTheReadouts() {
+    double least = Double.POSITIVE_INFINITY;
+    String name = "";
+    for (Verdict verdict : model.verdicts()) {
+      if (verdict instanceof Verdict.Judged judged && judged.margin() < least) {
+        least = judged.margin();
+        name = Sentences.check(judged.kind());
+      }
+    }
+    javafx.scene.control.Button worst = robot.lookup("#check-worst").query();
+    assertTrue(worst.getAccessibleText().startsWith("least margin: " + name + ", margin"));
+    robot.interact(worst::fire);
+    WaitForAsyncUtils.waitForFxEvents();
+    assertEquals("Check: " + name, title());
   }
 
   @Test

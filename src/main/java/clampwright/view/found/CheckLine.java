@@ -16,19 +16,31 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 
-/** One check with its sign and margin; pressing it opens the working behind it. */
+/**
+ * One check with its sign and margin; pressing it opens the working behind it. It may stand for
+ * another check from time to time, as the line of the least margin does.
+ */
 final class CheckLine extends Button {
-  private final CheckKind kind;
+  private final String before;
   private final Label name = new Label();
   private final Label margin = new Label();
   private String description = "";
 
+  /** The line of one check. */
   CheckLine(CheckKind kind) {
-    this.kind = kind;
+    this("", kind.name().toLowerCase(Locale.ROOT).replace('_', '-'));
+  }
+
+  /**
+   * A line.
+   *
+   * @param before words before the check's name
+   * @param id by which it is found
+   */
+  CheckLine(String before, String id) {
+    this.before = before;
     getStyleClass().setAll("check");
-    String id = kind.name().toLowerCase(Locale.ROOT).replace('_', '-');
     setId("check-" + id);
-    name.setText(Sentences.check(kind));
     name.getStyleClass().add("check-name");
     margin.getStyleClass().add("check-margin");
     margin.setId("margin-" + id);
@@ -48,6 +60,7 @@ final class CheckLine extends Button {
   }
 
   void show(Verdict verdict, Joint joint) {
+    name.setText(before + Sentences.check(verdict.kind()));
     Verdicts.Standing standing = Verdicts.standing(verdict);
     for (Verdicts.Standing each : Verdicts.Standing.values()) {
       PseudoClass state =
@@ -62,6 +75,6 @@ final class CheckLine extends Button {
       margin.setText("–");
       description = "not applicable: " + not.why().text();
     }
-    setAccessibleText(Sentences.check(kind) + ", margin " + margin.getText() + ", " + description);
+    setAccessibleText(name.getText() + ", margin " + margin.getText() + ", " + description);
   }
 }

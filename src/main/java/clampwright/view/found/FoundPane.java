@@ -12,6 +12,7 @@ import clampwright.mechanics.Assessment;
 import clampwright.mechanics.Assessment.Solved;
 import clampwright.mechanics.Assessment.Unsolved;
 import clampwright.mechanics.checks.CheckKind;
+import clampwright.mechanics.checks.Verdict;
 import clampwright.quantity.Dimension;
 import clampwright.quantity.Quantities;
 import clampwright.quantity.UnitSystem;
@@ -20,8 +21,11 @@ import clampwright.view.Headings;
 import clampwright.view.OncePerPulse;
 import clampwright.view.PartName;
 import clampwright.view.found.Remarks.Remark;
+import java.util.Comparator;
 import java.util.EnumMap;
+import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
@@ -40,6 +44,7 @@ public final class FoundPane extends ScrollPane {
   private final FigurePlace ladder =
       new FigurePlace("Load ladder: preload, bolt load, limits and parting on one axis").tall(150);
   private final Label ladderUnit = new Label();
+  private final CheckLine worst = new CheckLine("least margin: ", "worst");
   private final CheckList checks;
   private final MethodList methods = new MethodList();
   private final Region noticeRule = rule();
@@ -58,6 +63,8 @@ public final class FoundPane extends ScrollPane {
       SketchModel model, Consumer<Headline> openWorking, Consumer<CheckKind> openCheck) {
     this.model = model;
     checks = new CheckList(openCheck);
+    worst.setOnAction(
+        event -> least(model.verdicts()).ifPresent(at -> openCheck.accept(at.kind())));
     spread.getStyleClass().add("method-spread");
     ladder.setId("load-ladder");
     getStyleClass().add("found");
@@ -74,6 +81,7 @@ public final class FoundPane extends ScrollPane {
         .getChildren()
         .addAll(
             readoutGrid(),
+            worst,
             noticeRule,
             notices,
             rule(),
@@ -150,7 +158,7 @@ public final class FoundPane extends ScrollPane {
     unsolvedSheet.setManaged(!solved);
     if (assessment instanceof Solved found) {
       show(found, sketch);
-      reasons.show(java.util.List.of());
+      reasons.show(List.of());
     } else {
       show((Unsolved) assessment, sketch.units());
     }
@@ -167,6 +175,10 @@ public final class FoundPane extends ScrollPane {
     ladder.show((width, height) -> LoadLadderFigure.of(sketch, solved, shown, width, height));
     ladderUnit.setText(Quantities.unit(Dimension.FORCE, sketch.units()));
     checks.show(model.verdicts(), sketch.joint());
+    Optional<Verdict.Judged> least = least(model.verdicts());
+    worst.setVisible(least.isPresent());
+    worst.setManaged(least.isPresent());
+    least.ifPresent(verdict -> worst.show(verdict, sketch.joint()));
     methods.show(solved.members(), chosen, introduction, sketch.units());
     noticeRule.setVisible(!solved.notices().isEmpty());
     noticeRule.setManaged(noticeRule.isVisible());
@@ -175,6 +187,13 @@ public final class FoundPane extends ScrollPane {
         solved.notices().stream()
             .map(notice -> new Remark(notice.part(), Sentences.notice(notice)))
             .toList());
+  }
+
+  private static Optional<Verdict.Judged> least(List<Verdict> verdicts) {
+    return verdicts.stream()
+        .filter(Verdict.Judged.class::isInstance)
+        .map(Verdict.Judged.class::cast)
+        .min(Comparator.comparingDouble(Verdict.Judged::margin));
   }
 
   private void show(Unsolved unsolved, UnitSystem units) {

@@ -23,6 +23,8 @@ final class SectionScene {
     model = new SketchModel(sketch);
     pane = new SectionPane(model);
     stage.setScene(new Scene(pane, WIDTH, HEIGHT));
+    // The stage may still have the size that another test gave it.
+    stage.sizeToScene();
     stage.show();
   }
 
