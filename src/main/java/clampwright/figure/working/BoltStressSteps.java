@@ -22,11 +22,13 @@ record BoltStressSteps(CheckWorking check) {
     List<Step> steps = new ArrayList<>(check.preload().assembly());
     double tension = force / limits.area();
     double torsion = force * limits.threadArm() / limits.plasticSection();
-    steps.add(tension("Tension σ", "F_0,max/A_s", tension));
+    steps.add(tension("Tension σ", "F_0,max/A_s", force, tension));
     steps.add(
         torsion(
             "Torsion τ, plastic section",
             "F_0,max·(P/2π + µ·d2/(2·cos 30°))/(π·d_s³/12)",
+            force,
+            12,
             torsion));
     steps.add(equivalent(tension, torsion));
     return steps;
@@ -52,22 +54,37 @@ record BoltStressSteps(CheckWorking check) {
     double tension = load / limits.area();
     double left = 0.5 * check.found().solved().preload().assemblyMax();
     double torsion = left * limits.threadArm() / limits.elasticSection();
-    steps.add(tension("Tension σ", "F_b/A_s", tension));
+    steps.add(tension("Tension σ", "F_b/A_s", load, tension));
     steps.add(
         torsion(
             "Torsion left τ, elastic section",
             "0.5·F_0,max·(P/2π + µ·d2/(2·cos 30°))/(π·d_s³/16)",
+            left,
+            16,
             torsion));
     steps.add(equivalent(tension, torsion));
     return steps;
   }
 
-  private Step tension(String label, String formula, double stress) {
-    return check.step(label, formula, "", numbers().stressResult(stress));
+  private Step tension(String label, String formula, double force, double stress) {
+    String put = numbers().stressOf(numbers().force(force), numbers().area(check.limits().area()));
+    return check.step(label, formula, put, numbers().stressResult(stress));
   }
 
-  private Step torsion(String label, String formula, double stress) {
-    return check.step(label, formula, "", numbers().stressResult(stress));
+  /** A hollow bolt's section is left in symbols. */
+  private Step torsion(String label, String formula, double force, double twelfths, double stress) {
+    Fastener fastener = check.found().joint().fastener();
+    ScrewThread thread = fastener.thread();
+    String d = numbers().length((thread.pitchDiameter() + thread.minorDiameter()) / 2);
+    String arm = numbers().length(check.limits().threadArm());
+    String put =
+        fastener.bore() > 0
+            ? ""
+            : numbers()
+                .stressOf(
+                    numbers().force(force) + " × " + arm,
+                    "(π × %s × %s × %s / %s)".formatted(d, d, d, numbers().plain(twelfths)));
+    return check.step(label, formula, put, numbers().stressResult(stress));
   }
 
   private Step equivalent(double tension, double torsion) {
@@ -98,7 +115,10 @@ record BoltStressSteps(CheckWorking check) {
         check.step(
             "Amplitude σ_a",
             "(F_b,most − F_b,least)/(2·A_s)",
-            "",
+            numbers()
+                .stressOf(
+                    "(" + numbers().force(upper) + " − " + numbers().force(lower) + ")",
+                    "(2 × " + numbers().area(limits.area()) + ")"),
             check.result((upper - lower) / 2 / limits.area())));
     steps.add(endurable());
     return steps;

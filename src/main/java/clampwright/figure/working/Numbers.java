@@ -75,6 +75,13 @@ record Numbers(UnitSystem units) {
     return plain(1e6 * perKelvin);
   }
 
+  /** A force over an area such that a stress comes out: kN over mm² is GPa, lbf over in² is psi. */
+  String stressOf(String force, String area) {
+    return units == UnitSystem.METRIC
+        ? "1000 × " + force + " / " + area
+        : force + " / (1000 × " + area + ")";
+  }
+
   /** A number that has no unit to be converted. */
   String plain(double value) {
     return put(Dimension.RATIO, value);
