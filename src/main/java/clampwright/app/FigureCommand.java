@@ -37,6 +37,7 @@ import picocli.CommandLine.Parameters;
     })
 final class FigureCommand implements Callable<Integer> {
   private static final int FAILED = 2;
+  private static final double MM_PER_INCH = 25.4;
 
   private final PrintStream out;
   private final PrintStream err;
@@ -80,6 +81,12 @@ final class FigureCommand implements Callable<Integer> {
       names = "--without-sketch",
       description = "leave the sketch out, which else lies inside, so that the picture opens again")
   private boolean withoutSketch;
+
+  @Option(
+      names = "--width",
+      paramLabel = "PX",
+      description = "width of a PNG in pixels, in place of --dpi")
+  private int width;
 
   @Option(
       names = "--units",
@@ -156,12 +163,17 @@ final class FigureCommand implements Callable<Integer> {
     if (of.isEmpty() || size.isEmpty() || look.isEmpty() || !known) {
       return Optional.empty();
     }
-    if (!(dpi >= 10 && dpi <= 2400)) {
-      err.println("--dpi must lie between 10 and 2400");
+    double resolution = width == 0 ? dpi : width / (size.get().width() / MM_PER_INCH);
+    if (!(resolution >= 10 && resolution <= 2400)) {
+      err.println(
+          width == 0
+              ? "--dpi must lie between 10 and 2400"
+              : "--width comes to a resolution outside 10 to 2400 dpi");
       return Optional.empty();
     }
     PictureFigure.Request request = new PictureFigure.Request(size.get(), shown, caption, 0);
-    return Optional.of(new Picture(of.get(), look.get(), dpi, !withoutSketch, system, request));
+    return Optional.of(
+        new Picture(of.get(), look.get(), resolution, !withoutSketch, system, request));
   }
 
   private static String word(UnitSystem system) {

@@ -12,6 +12,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
+import javax.imageio.ImageIO;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -89,6 +90,16 @@ class FigureCommandTest {
     assertEquals(
         SketchFile.read(Path.of(LID)) instanceof Stored.Opened lid ? lid.sketch() : null,
         ((Stored.Opened) SketchFile.read(picture)).sketch());
+  }
+
+  @Test
+  void aPngIsAsWideAsAsked() throws IOException {
+    Path picture = folder.resolve("a.png");
+    Run run = Run.of("figure", LID, "-o", picture.toString(), "--width", "1234");
+    assertEquals(0, run.exit(), run.err());
+    assertEquals(1234, ImageIO.read(picture.toFile()).getWidth());
+    Run tiny = Run.of("figure", LID, "-o", picture.toString(), "--width", "3");
+    assertEquals("--width comes to a resolution outside 10 to 2400 dpi", tiny.err().strip());
   }
 
   @Test
