@@ -40,10 +40,16 @@ public final class Verdicts {
     return margin > LARGE ? "> +99" : signed(margin);
   }
 
-  /** With two decimals, never rounded to 0 from below: +0.00 holds, −0.01 fails. */
+  /**
+   * With two decimals; four where it fails by less than a hundredth, and never rounded to 0 from
+   * below: +0.00 holds, −0.0001 fails.
+   */
   public static String signed(double margin) {
+    if (margin < 0 && margin > -0.01) {
+      return String.format(Locale.ROOT, "\u2212%.4f", Math.max(0.0001, -margin));
+    }
     if (margin < 0) {
-      return String.format(Locale.ROOT, "\u2212%.2f", Math.max(0.01, -margin));
+      return String.format(Locale.ROOT, "\u2212%.2f", -margin);
     }
     return String.format(Locale.ROOT, "+%.2f", margin);
   }
